@@ -51,7 +51,7 @@ export type Finding = {
 const rank: Readonly<Record<Severity, number>> = { stop: 0, check: 1, note: 2 };
 
 /** Worst first; within a severity the order they were found in. */
-export const bySeverity = (findings: readonly Finding[]): readonly Finding[] =>
+export const bySeverity = <Found extends Finding>(findings: readonly Found[]): readonly Found[] =>
   findings.toSorted((left, right) => rank[left.severity] - rank[right.severity]);
 
 export const countBySeverity = (findings: readonly Finding[]): Readonly<Record<Severity, number>> => ({
