@@ -94,8 +94,8 @@ export const applyEdit = (content: PlanContent, edit: PlanEdit, newId: NewId): P
       return withRules(put(content.rules, { kind: 'split', target: edit.target, conditions: edit.conditions }, newId,
         (rule) => ({ ...rule, stations: [...new Set(edit.stations)], keep: edit.keep })));
     case 'copy':
-      return withRules(put(content.rules, { kind: 'copy', target: edit.target, conditions: edit.conditions }, newId,
-        (rule) => ({ ...rule, stations: sendStations(edit, rule.stations) })));
+      return withRules(edit.targets.reduce<Rules>((rules, target) => put(rules, { kind: 'copy', target, conditions: edit.conditions }, newId,
+        (rule) => ({ ...rule, stations: sendStations(edit, rule.stations) })), content.rules));
     case 'change-rule': return withRules(changeRule(content.rules, edit));
     case 'remove-rules': return withRules(content.rules.filter((rule) => !edit.rules.includes(rule.id)));
     case 'reorder': return withRules(reorder(content.rules, edit.rule, edit.above));

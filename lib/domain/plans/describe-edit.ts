@@ -49,8 +49,11 @@ export const describeEdit = (edit: PlanEdit, site: BoardSite, content: PlanConte
       return edit.stations.length === 0
         ? capitalise(`${sayTarget(edit.target, site)} stays with its dish${when(edit.conditions, site)}`)
         : capitalise(`${sayTarget(edit.target, site)} splits to ${sayStations(site, edit.stations)}${when(edit.conditions, site)}`);
-    case 'copy':
-      return capitalise(`${edit.how === 'add' ? 'copy' : 'no copy'} of ${sayTarget(edit.target, site).replace('Everything', 'everything')} ${edit.how === 'add' ? 'to' : 'at'} ${sayStations(site, edit.stations)}${when(edit.conditions, site)}`);
+    case 'copy': {
+      const names = edit.targets.some((target) => target.kind === 'everything') ? 'everything' : sayTargets(edit.targets, site);
+      const stations = sayStations(site, edit.stations);
+      return `${edit.how === 'add' ? `Copy of ${names} to ${stations}` : `No copy of ${names} at ${stations}`}${when(edit.conditions, site)}`;
+    }
     case 'change-rule': {
       const rule = content.rules.find((candidate) => candidate.id === edit.rule);
       if (rule === undefined) return 'A rule that has gone';

@@ -35,7 +35,7 @@ export type PlanEdit =
   }
   | {
     readonly kind: 'copy';
-    readonly target: CopyTarget;
+    readonly targets: readonly CopyTarget[];
     readonly conditions: Conditions;
     readonly how: 'add' | 'remove';
     readonly stations: readonly StationId[];

@@ -18,7 +18,7 @@ const edits: readonly (readonly [string, PlanEdit])[] = [
   ['Burgers and Oysters to Grill and Bar', { kind: 'send', targets: [burgers, oysters], conditions: anyCondition, how: 'replace', stations: [asId('grill'), asId('bar')] }],
   ['Steak roll also to Larder (take away)', { kind: 'send', targets: [steakRoll], conditions: { ...anyCondition, orderTypes: ['take-away'] }, how: 'add', stations: [asId('larder')] }],
   ['Side salad splits to Larder', { kind: 'split', target: sideSalad, conditions: anyCondition, stations: [asId('larder')], keep: false }],
-  ['Copy of everything to Bar', { kind: 'copy', target: { kind: 'everything' }, conditions: anyCondition, how: 'add', stations: [asId('bar')] }],
+  ['Copy of everything to Bar', { kind: 'copy', targets: [{ kind: 'everything' }], conditions: anyCondition, how: 'add', stations: [asId('bar')] }],
   ['Burgers to Bar', { kind: 'change-rule', rule: asId('r1'), stations: [asId('bar')] }],
   ['No longer: Copy of everything to Pass', { kind: 'remove-rules', rules: [asId('r2')] }],
   ['Oysters not offered', { kind: 'offer', sections: [asId('oysters')], offered: false, all: [] }],
