@@ -8,7 +8,7 @@ export type TicketStation = { readonly id: StationId; readonly code: string; rea
 /** What was said of a guest's seat, or of everyone at the table when the seat is null. */
 export type TicketAllergy = { readonly seat: number | null; readonly words: string };
 
-export const lineMarks = ['HOLD', 'RUSH', 'REMAKE', 'REPRINT', 'AMENDED', 'VOID'] as const;
+export const lineMarks = ['COPY', 'HOLD', 'RUSH', 'REMAKE', 'REPRINT', 'AMENDED', 'VOID'] as const;
 export type LineMark = (typeof lineMarks)[number];
 
 /** An option as the kitchen reads it; the codes name the stations that make it, on copies and joined tickets. */
