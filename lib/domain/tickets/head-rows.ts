@@ -16,10 +16,10 @@ export const numberWords = (ticket: Pick<Ticket, 'orderNumber' | 'sending'>): st
 const takenWords = { 'eat-in': '', 'take-away': 'TO TAKE AWAY', delivery: 'DELIVERY' } as const;
 
 /** The table; a guest without one is known by how the food leaves, and failing that by the order's number. */
-const placeWords = (ticket: Ticket): string => {
-  if (ticket.table !== '') return `table ${ticket.table}`;
+const placeWords = (ticket: Ticket, paper: Paper): string => {
+  if (ticket.table !== '') return paper.words(`table ${ticket.table}`);
   const taken = takenWords[ticket.orderType];
-  return taken === '' && ticket.orderNumber !== '' ? `No ${ticket.orderNumber}` : taken;
+  return taken === '' && ticket.orderNumber !== '' ? paper.words(`No ${ticket.orderNumber}`, 'as typed') : taken;
 };
 
 const senderRows = (ticket: Ticket, paper: Paper): readonly Row[] => {
@@ -41,7 +41,7 @@ export const headRows = (ticket: Ticket, paper: Paper, { page, pages }: PageOf):
     ...spreadRows(station, ticket.time, paper, bold),
     ...(printsFor === null ? [] : wrappedRows(`FOR ${paper.words(printsFor.station)}, ${paper.words(printsFor.reason, 'as typed')}`, 0, paper, bold)),
     ...ticket.event.words.flatMap((words) => wrappedRows(paper.words(words), 0, paper, large)),
-    ...wrappedRows(paper.words(placeWords(ticket)), 0, paper, large),
+    ...wrappedRows(placeWords(ticket, paper), 0, paper, large),
     ...wrappedRows(taken, 0, paper, bold),
     ...senderRows(ticket, paper),
     ...(pages === 1 ? [] : wrappedRows(`page ${page} of ${pages}`, 0, paper)),
