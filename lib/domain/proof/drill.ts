@@ -23,8 +23,8 @@ export type DrillResult = {
   readonly partLostItems: readonly ItemId[];
   readonly tills: readonly TillId[];
   readonly lostWays: number;
-  /** For a pair: neither printer alone loses these. */
-  readonly minimal: boolean;
+  /** Numbers of the classes of ways that are lost or part lost by it. */
+  readonly classes: ReadonlySet<number>;
 };
 
 /** The state of the kitchen under a fault; a shared point takes its printers and tills with it. */
@@ -72,6 +72,7 @@ export const prepareDrill = (site: Site, plan: PlanContent, ways: Ways) => {
     const lost = new Set<ItemId>();
     const part = new Set<ItemId>();
     const tills = new Set<TillId>();
+    const classes = new Set<number>();
     let lostWays = 0;
     ways.classes.forEach((one, index) => {
       const before = unbroken[index];
@@ -80,6 +81,7 @@ export const prepareDrill = (site: Site, plan: PlanContent, ways: Ways) => {
       if (outcome === 'prints' || outcome === before) return;
       for (const item of one.items) (outcome === 'lost' ? lost : part).add(item);
       tills.add(one.till);
+      classes.add(one.number);
       lostWays += one.ways;
     });
     return {
@@ -88,7 +90,38 @@ export const prepareDrill = (site: Site, plan: PlanContent, ways: Ways) => {
       partLostItems: [...part].filter((item) => !lost.has(item)),
       tills: [...tills],
       lostWays,
-      minimal: true,
+      classes,
     };
+  };
+};
+
+/** A pair of printers that loses what neither loses alone: a minimal cut of order two. */
+export type PairResult = DrillResult & { readonly beyond: number };
+
+export type Drill = {
+  /** What loses something alone, most ways first: the single points of failure. */
+  readonly single: readonly DrillResult[];
+  /** Faults that lose nothing. */
+  readonly harmless: readonly Fault[];
+  /** Minimal pairs, most ways lost beyond their parts first. */
+  readonly pairs: readonly PairResult[];
+};
+
+/** The whole drill: every single fault, then every pair of printers with what only the pair loses. */
+export const runDrill = (site: Site, plan: PlanContent, ways: Ways): Drill => {
+  const drill = prepareDrill(site, plan, ways);
+  const singles = singleFaults(site).map(drill);
+  const alone = new Map(singles.flatMap((result) => (result.fault.kind === 'printer' ? [[result.fault.printer, result.classes] as const] : [])));
+  const pairs = printerPairs(site).flatMap((fault): readonly PairResult[] => {
+    if (fault.kind !== 'printers') return [];
+    const result = drill(fault);
+    const lostAlone = (number: number): boolean => fault.printers.some((printer) => alone.get(printer)?.has(number) ?? false);
+    const beyond = [...result.classes].filter((number) => !lostAlone(number)).reduce((sum, number) => sum + (ways.classes[number]?.ways ?? 0), 0);
+    return beyond === 0 ? [] : [{ ...result, beyond }];
+  });
+  return {
+    single: singles.filter((result) => result.lostWays > 0).toSorted((left, right) => right.lostWays - left.lostWays),
+    harmless: singles.filter((result) => result.lostWays === 0).map((result) => result.fault),
+    pairs: pairs.toSorted((left, right) => right.beyond - left.beyond),
   };
 };

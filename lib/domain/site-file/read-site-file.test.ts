@@ -15,10 +15,16 @@ const whole = aSite({
   plans: [aPlan([aRule('r1', 'send', { kind: 'section', section: asId('burgers') }, ['grill'])])],
 });
 
-/** The document with one thing changed by its path. */
-const withChange = (change: (document: { site: Record<string, never> }) => void): string => {
-  const document = JSON.parse(writeSiteFile(whole));
-  change(document);
+type Json = { [key: string]: Json } & Json[];
+
+/** The document with one value put at a path, "+" meaning the end of a list. */
+const withChange = (path: string, value: unknown): string => {
+  const document = JSON.parse(writeSiteFile(whole)) as Json;
+  const steps = path.split('.');
+  const last = steps.pop()!;
+  const place = steps.reduce((at, step) => at[step as never] as Json, document);
+  if (last === '+') place.push(value as Json);
+  else Object.assign(place, { [last]: value });
   return JSON.stringify(document);
 };
 
@@ -41,20 +47,19 @@ describe('reading a site file', () => {
     ['another version', '{"tamisSiteFile": 7}', 'tamisSiteFile: The file is of version 7, and this program reads version 1.'],
     ['a maze', '['.repeat(100_000), ': The file nests deeper than 32 levels, which this format never does. Nothing was read.'],
     ['far too much', ' '.repeat(10_000_001), ': The file is larger than 10 MB, which no site needs. Nothing was read.'],
-    ['an area that does not exist', withChange(({ site }) => { (site['tills'] as { area: string }[])[0]!.area = 'cellar'; }), 'site.tills[0].area: There is no area with the id “cellar”.'],
-    ['a rule to no station', withChange(({ site }) => { (site['plans'] as { rules: { stations: string[] }[] }[])[0]!.rules[0]!.stations = ['oven']; }), 'site.plans[0].rules[0].stations[0]: There is no station with the id “oven”.'],
-    ['a section that does not exist', withChange(({ site }) => { (site['plans'] as { rules: { target: { section: string } }[] }[])[0]!.rules[0]!.target.section = 'soups'; }), 'site.plans[0].rules[0].target.section: There is no section with the id “soups”.'],
-    ['a name twice', withChange(({ site }) => { (site['printers'] as object[]).push({ ...aPrinter('x', '10.20.30.202'), name: 'grill1' }); }), 'site.printers[1]: The printer name “grill1” stands already at site.printers[0].'],
-    ['an id twice', withChange(({ site }) => { (site['stations'] as object[]).push({ ...aStation('grill', []), name: 'Other', code: 'XY' }); }), 'site.stations[1]: The id “grill” stands already at site.stations[0].'],
-    ['a till that prints through itself', withChange(({ site }) => { (site['tills'] as { printsThrough: string }[])[0]!.printsThrough = 'till1'; }), 'site.tills[0].printsThrough: till1 prints through others that print through it: nobody prints.'],
+    ['an area that does not exist', withChange('site.tills.0.area', 'cellar'), 'site.tills[0].area: There is no area with the id “cellar”.'],
+    ['a rule to no station', withChange('site.plans.0.rules.0.stations', ['oven']), 'site.plans[0].rules[0].stations[0]: There is no station with the id “oven”.'],
+    ['a section that does not exist', withChange('site.plans.0.rules.0.target.section', 'soups'), 'site.plans[0].rules[0].target.section: There is no section with the id “soups”.'],
+    ['a name twice', withChange('site.printers.+', { ...aPrinter('x', '10.20.30.202'), name: 'grill1' }), 'site.printers[1]: The printer name “grill1” stands already at site.printers[0].'],
+    ['an id twice', withChange('site.stations.+', { ...aStation('grill', []), name: 'Other', code: 'XY' }), 'site.stations[1]: The id “grill” stands already at site.stations[0].'],
+    ['a till that prints through itself', withChange('site.tills.0.printsThrough', 'till1'), 'site.tills[0].printsThrough: till1 prints through others that print through it: nobody prints.'],
   ])('refuses %s with the path of the fault', (_, text, fault) => {
     expect(faultsOf(text)).toContain(fault);
   });
 
   it('names every field of the wrong kind, and fields it does not know', () => {
-    const faults = faultsOf(withChange(({ site }) => { Object.assign(site, { tills: 'none', colour: 'red' }); }));
-    expect(faults.some((fault) => fault.startsWith('site.tills: '))).toBe(true);
-    expect(faults.some((fault) => fault.includes('colour'))).toBe(true);
+    expect(faultsOf(withChange('site.tills', 'none')).some((fault) => fault.startsWith('site.tills: '))).toBe(true);
+    expect(faultsOf(withChange('site.colour', 'red')).some((fault) => fault.includes('colour'))).toBe(true);
   });
 
   it('never throws, whatever it is given', () => {
