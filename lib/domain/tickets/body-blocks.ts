@@ -24,7 +24,7 @@ const courseBlocks = (ticket: Ticket, paper: Paper): readonly Block[] =>
 const seatBlocks = (ticket: Ticket, paper: Paper): readonly Block[] => {
   const seats = [...new Set(ticket.courses.flatMap(({ lines }) => lines.map(({ seat }) => seat)))].toSorted((left, right) => (left ?? 0) - (right ?? 0));
   return seats.flatMap((seat) => ticket.courses.flatMap(({ course, lines }) => {
-    const heading = wrappedRows(`${seatWords(seat).toUpperCase()}, ${paper.words(course)}`, 0, paper, bold);
+    const heading = wrappedRows([seatWords(seat).toUpperCase(), paper.words(course)].filter((words) => words !== '').join(', '), 0, paper, bold);
     const own = mergeLines(lines.filter((line) => line.seat === seat));
     return own.map((entry) => ({ heading, rows: lineRows(entry, paper, 'above') }));
   }));
