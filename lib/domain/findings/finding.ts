@@ -1,3 +1,5 @@
+import type { PortKind } from '../site/till';
+
 /** `stop` may not go live, `check` a person must look, `note` worth knowing. */
 export const severities = ['stop', 'check', 'note'] as const;
 export type Severity = (typeof severities)[number];
@@ -18,21 +20,30 @@ export type Subject = {
   readonly till?: string;
 };
 
-/** A mend that one press applies; data, so that any screen or script can apply it. */
+/**
+ * A mend that one press applies; data, so that any screen or script can apply it. `print-test` is the one that
+ * needs hands: it leads to where the test is printed and noted.
+ */
 export type Fix =
   | { readonly kind: 'rename-printer'; readonly printer: string; readonly name: string; readonly label: string }
   | { readonly kind: 'rename-queue'; readonly till: string; readonly printer: string; readonly name: string; readonly label: string }
-  | { readonly kind: 'set-queue-port'; readonly till: string; readonly printer: string; readonly portKind: 'tcp'; readonly portAddress: string; readonly label: string }
+  | { readonly kind: 'set-queue-port'; readonly till: string; readonly printer: string; readonly portKind: PortKind; readonly portAddress: string; readonly label: string }
+  | { readonly kind: 'add-queue'; readonly till: string; readonly printer: string; readonly name: string; readonly portKind: PortKind; readonly portAddress: string; readonly label: string }
   | { readonly kind: 'set-printer-address'; readonly printer: string; readonly address: string; readonly label: string }
   | { readonly kind: 'set-printer-mask'; readonly printer: string; readonly mask: string; readonly label: string }
   | { readonly kind: 'set-printer-gateway'; readonly printer: string; readonly gateway: string; readonly label: string }
   | { readonly kind: 'set-printer-port'; readonly printer: string; readonly port: number; readonly label: string }
+  | { readonly kind: 'set-printer-mac'; readonly printer: string; readonly mac: string; readonly label: string }
   | { readonly kind: 'reserve-address'; readonly address: string; readonly reason: string; readonly label: string }
   | { readonly kind: 'set-till-address'; readonly till: string; readonly address: string; readonly label: string }
   | { readonly kind: 'set-till-mask'; readonly till: string; readonly mask: string; readonly label: string }
+  | { readonly kind: 'clear-prints-through'; readonly till: string; readonly label: string }
   | { readonly kind: 'clear-default-printer'; readonly till: string; readonly label: string }
   | { readonly kind: 'set-backup'; readonly printer: string; readonly backup: string; readonly label: string }
   | { readonly kind: 'set-stand-in'; readonly station: string; readonly standIn: string; readonly label: string }
+  | { readonly kind: 'set-network'; readonly change: Partial<Record<'subnet' | 'gateway' | 'poolFrom' | 'poolTo', string>>; readonly label: string }
+  | { readonly kind: 'set-link-address'; readonly address: string; readonly mask: string; readonly label: string }
+  | { readonly kind: 'print-test'; readonly printer: string; readonly label: string }
   | { readonly kind: 'send-sections'; readonly plan: string; readonly sections: readonly string[]; readonly stations: readonly string[]; readonly label: string }
   | { readonly kind: 'remove-rule'; readonly plan: string; readonly rule: string; readonly label: string };
 
