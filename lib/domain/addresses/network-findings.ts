@@ -6,6 +6,7 @@ import { readAddress } from './read-address';
 import { rangeOf, verdictOf } from './special-ranges';
 import { formatSubnet, inSubnet, isHostOf, isValidSubnet, parseSubnet, readSubnet, subnetAround, type Subnet } from './subnet';
 import { judgeDeviceAddress, siteMaskOf } from './device-findings';
+import { maskFinding } from './mask-findings';
 import { nextFreeAddress } from './next-free-address';
 import { inPool, readPool, type AddressSite } from './taken-addresses';
 
@@ -92,10 +93,14 @@ const linkFindings = (site: NetworkSite): readonly Finding[] => {
   const { address, mask } = site.link;
   const siteMask = siteMaskOf(site);
   const setTo = (to: string, withMask: string): Fix => ({ kind: 'set-link-address', address: to, mask: withMask, label: `Give it ${to}` });
-  return judgeDeviceAddress(site, {
-    kind: 'link', id: 'link', name: 'The print link', address, mask, keepsItsAddress: true, yields: false, subject: { kind: 'site', id: site.id },
-    free: nextFreeAddress(site, 'till'), offer: (to) => (to === null ? [] : [setTo(to, siteMask ?? mask)]),
-  }).map((one) => ({ ...one, code: `link-${one.code}`, subject: { ...one.subject, field: 'link.address' } }));
+  const subject = { kind: 'site', id: site.id } as const;
+  return [
+    ...judgeDeviceAddress(site, {
+      kind: 'link', id: 'link', name: 'The print link', address, mask, keepsItsAddress: true, yields: false, subject,
+      free: nextFreeAddress(site, 'till'), offer: (to) => (to === null ? [] : [setTo(to, siteMask ?? mask)]),
+    }),
+    ...maskFinding({ name: 'The print link', mask, subject, offer: (to) => ({ kind: 'set-link-address', address, mask: to, label: `Use ${to}` }) }, siteMask),
+  ].map((one) => ({ ...one, code: `link-${one.code}`, subject: { ...one.subject, field: `link.${one.subject.field ?? 'address'}` } }));
 };
 
 /** What is wrong with the network as a whole, before any device is looked at. */

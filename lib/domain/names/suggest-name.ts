@@ -36,10 +36,11 @@ export const suggestName = (wanted: string, taken: readonly string[], sitePolicy
   const base = leaveOut(wanted, policy);
   if (passes(base)) return base;
   const highest = Math.min(9999, 10 ** Math.max(0, policy.maxLength - 1) - 1);
-  for (const stem of [base.replace(/\d+$/, ''), base, ...lastResorts]) {
+  const unnumbered = base.replace(/\d+$/, '');
+  const own = Number(base.slice(unnumbered.length));
+  for (const stem of [unnumbered, base, ...lastResorts]) {
     if (stem === '') continue;
-    const own = Number(/\d+$/.exec(base)?.[0] ?? 0);
-    const first = stem === base.replace(/\d+$/, '') && own < highest ? own + 1 : 1;
+    const first = stem === unnumbered && own <= highest ? Math.max(1, own) : 1;
     for (let number = first; number <= highest; number += 1) {
       const candidate = numbered(stem, number, policy);
       if (passes(candidate)) return candidate;
