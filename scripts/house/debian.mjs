@@ -41,9 +41,10 @@ export function wayToInstall(packages, { isRoot, hasApt }) {
       kind: 'sentence',
       text: `Tamis needs ${packages.join(' and ')} and this system has no apt-get; install MariaDB 10.11 or later (for tests also Chromium) in your system's way and start again.`,
     };
-  const command = `apt-get update && ${isRoot ? '' : 'sudo '}apt-get install -y --no-install-recommends ${packages.join(' ')}`;
+  const asRoot = isRoot ? '' : 'sudo ';
+  const command = `${asRoot}apt-get update && ${asRoot}apt-get install -y --no-install-recommends ${packages.join(' ')}`;
   if (isRoot) return { kind: 'run', command };
-  return { kind: 'sentence', text: `Tamis needs ${packages.join(' and ')}, which only root may install. Run this, then start again:\n\n    sudo ${command}\n` };
+  return { kind: 'sentence', text: `Tamis needs ${packages.join(' and ')}, which only root may install. Run this, then start again:\n\n    ${command}\n` };
 }
 
 export async function installFromDebian(wanted, home) {
