@@ -6,7 +6,7 @@ import type { Menu } from './menu';
 import type { AreaId, CourseId, SharedPointId, SiteId, TillId } from './ids';
 
 /** A part of the room that orders come from. */
-export type Area = { readonly id: AreaId; readonly name: string };
+export type Area = { readonly id: AreaId; readonly name: string; readonly version: number };
 
 export type Course = { readonly id: CourseId; readonly name: string };
 
@@ -94,4 +94,6 @@ export type Site = {
   readonly menu: Menu;
   readonly plans: readonly Plan[];
   readonly live: LivePlan | null;
+  /** Version of the site's own settings. */
+  readonly version: number;
 };

@@ -40,4 +40,5 @@ export type Till = {
   readonly defaultPrinter: PrinterId | null;
   readonly printsThrough: TillId | null;
   readonly queues: readonly Queue[];
+  readonly version: number;
 };
