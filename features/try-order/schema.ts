@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import type { Order } from '@/lib/domain/orders/order';
 import { asId } from '@/lib/domain/site/ids';
 import type { AreaId, CourseId, ItemId, OptionId, PlanId, TillId } from '@/lib/domain/site/ids';
 import { orderTypes } from '@/lib/domain/site/order-types';
@@ -36,7 +37,7 @@ export type PresentChoice = (typeof presentChoices)[number];
 
 /** What a person has written, kept in the browser until they clear it. */
 export const draftSchema = z.object({ plan: id<PlanId>(), present: z.enum(presentChoices), order: orderSchema });
-export type Draft = z.infer<typeof draftSchema>;
+export type Draft = { readonly plan: PlanId; readonly present: PresentChoice; readonly order: Order };
 
 export const tryOrderInput = draftSchema.extend({ time: z.string().regex(/^([01]\d|2[0-3]):[0-5]\d$/) });
-export type TryOrderInput = z.infer<typeof tryOrderInput>;
+export type TryOrderInput = Draft & { readonly time: string };

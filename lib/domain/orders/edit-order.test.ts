@@ -5,7 +5,7 @@ import { addLine, changeLine, emptyOrder, fromTill, removeLine, sayAllergy, seat
 import { newLine } from './order-line';
 
 const site = aSite({
-  areas: [{ id: asId('room'), name: 'Main room' }],
+  areas: [{ id: asId('room'), name: 'Main room', version: 1 }],
   tills: [aTill('phone', 'room', '', { kind: 'online', orderTypes: ['delivery'] }), aTill('till', 'room', '10.20.30.11')],
   menu: { sections: [aSection('Burgers')], items: [anItem('burger', 'Burgers')] },
 });

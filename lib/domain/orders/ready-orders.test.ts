@@ -2,16 +2,16 @@ import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { aGroup, anItem, anOption, aPlan, aRule, aSection, aSite, aStation, aPrinter, aTill } from '@/tests/fixtures/build-site';
 import { generated } from '@/tests/fixtures/generated-site';
-import { asId } from '@/lib/domain/site/ids';
+import { asId, type CourseId } from '@/lib/domain/site/ids';
 import { allWell } from '@/lib/domain/site/present';
 import { readyOrderKeys, readyOrders } from './ready-orders';
 import { refuseOrder } from './refuse-order';
 import { tryOrder } from './try-order';
 
-const courses = ['Drinks', 'Starters', 'Mains', 'Desserts'].map((name) => ({ id: asId(name) as never, name }));
+const courses = ['Drinks', 'Starters', 'Mains', 'Desserts'].map((name) => ({ id: asId<CourseId>(name), name }));
 const site = aSite({
   courses,
-  areas: [{ id: asId('room'), name: 'Main room' }, { id: asId('bar'), name: 'Bar counter' }, { id: asId('terrace'), name: 'Terrace' }],
+  areas: [{ id: asId('room'), name: 'Main room', version: 1 }, { id: asId('bar'), name: 'Bar counter', version: 1 }, { id: asId('terrace'), name: 'Terrace', version: 1 }],
   tills: [aTill('Till 1', 'room', '10.20.30.11'), aTill('Bar till', 'bar', '10.20.30.12'), aTill('Handheld', 'terrace', '10.20.30.13', { kind: 'handheld' })],
   stations: [aStation('Grill', ['GRILL1']), aStation('Larder', ['LARDER1'])],
   printers: [aPrinter('GRILL1', '10.20.30.201'), aPrinter('LARDER1', '10.20.30.202')],

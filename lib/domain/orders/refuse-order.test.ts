@@ -7,7 +7,7 @@ import { refuseOrder } from './refuse-order';
 import { tryOrder } from './try-order';
 
 const site = aSite({
-  areas: [{ id: asId('room'), name: 'Main room' }],
+  areas: [{ id: asId('room'), name: 'Main room', version: 1 }],
   courses: [{ id: asId('mains'), name: 'Mains' }],
   tills: [aTill('till', 'room', '10.20.30.11', { orderTypes: ['eat-in'] })],
   stations: [aStation('Grill', ['GRILL1'])],

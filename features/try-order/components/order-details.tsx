@@ -1,0 +1,95 @@
+'use client';
+
+import { fromTill } from '@/lib/domain/orders/edit-order';
+import { asId } from '@/lib/domain/site/ids';
+import type { PlanId, TillId } from '@/lib/domain/site/ids';
+import { orderTypeWords, type OrderType } from '@/lib/domain/site/order-types';
+import type { Site } from '@/lib/domain/site/site';
+import type { Draft } from '../schema';
+import styles from './try-order.module.css';
+import type { DraftControl } from './use-draft';
+
+const planWords = (site: Site, plan: Site['plans'][number]): string => {
+  if (site.live?.planId !== plan.id) return `${plan.name}, not live`;
+  return site.live.version === plan.version ? `${plan.name}, live` : `${plan.name} as edited, not live yet`;
+};
+
+const firstLetterLarge = (words: string): string => words.slice(0, 1).toUpperCase() + words.slice(1);
+
+type DetailsProps = { readonly site: Site; readonly draft: Draft } & Pick<DraftControl, 'change' | 'setOrder'>;
+
+function Under({ site, draft, change }: Omit<DetailsProps, 'setOrder'>) {
+  const states = [['planned', 'All open, all printers up'], ['now', 'As the kitchen is now']] as const;
+  return (
+    <div className={styles['under']}>
+      <label className={styles['field']}>
+        <span>Plan</span>
+        <select value={draft.plan} onChange={(event) => change({ plan: asId<PlanId>(event.target.value) })}>
+          {site.plans.map((plan) => <option key={plan.id} value={plan.id}>{planWords(site, plan)}</option>)}
+        </select>
+      </label>
+      <fieldset className={styles['choice']}>
+        <legend>State of the kitchen</legend>
+        {states.map(([value, words]) => (
+          <label key={value}>
+            <input type="radio" name="present" value={value} checked={draft.present === value} onChange={() => change({ present: value })} />
+            <span>{words}</span>
+          </label>
+        ))}
+      </fieldset>
+    </div>
+  );
+}
+
+/** Under which plan and state, from which till, for whom. */
+export function OrderDetails({ site, draft, change, setOrder }: DetailsProps) {
+  const { order } = draft;
+  const till = site.tills.find(({ id }) => id === order.till);
+  const areaName = site.areas.find(({ id }) => id === till?.area)?.name ?? '';
+  return (
+    <>
+      <Under site={site} draft={draft} change={change} />
+      <div className={styles['details']}>
+        <label className={styles['field']}>
+          <span>Till</span>
+          <select value={order.till} onChange={(event) => setOrder((now) => fromTill(now, site, asId<TillId>(event.target.value)))}>
+            {site.tills.map(({ id, name }) => <option key={id} value={id}>{name}</option>)}
+          </select>
+        </label>
+        <label className={styles['field']}>
+          <span>Area</span>
+          <select
+            value={order.area ?? ''}
+            onChange={(event) => setOrder(({ area: _, ...now }) => (event.target.value === '' ? now : { ...now, area: asId(event.target.value) }))}
+          >
+            <option value="">{areaName === '' ? 'The till’s own' : areaName}</option>
+            {site.areas.filter(({ id }) => id !== till?.area).map(({ id, name }) => <option key={id} value={id}>{name}</option>)}
+          </select>
+        </label>
+        <label className={styles['field']}>
+          <span>Order type</span>
+          <select value={order.orderType} onChange={(event) => setOrder((now) => ({ ...now, orderType: event.target.value as OrderType }))}>
+            {(till?.orderTypes ?? []).map((type) => <option key={type} value={type}>{firstLetterLarge(orderTypeWords[type])}</option>)}
+          </select>
+        </label>
+        <label className={styles['field']}>
+          <span>Table</span>
+          <input value={order.table} maxLength={40} onChange={(event) => setOrder((now) => ({ ...now, table: event.target.value }))} />
+        </label>
+        <label className={styles['field']}>
+          <span>Covers</span>
+          <input
+            inputMode="numeric"
+            value={order.covers ?? ''}
+            maxLength={3}
+            onChange={(event) => setOrder((now) => ({ ...now, covers: Number.parseInt(event.target.value, 10) || null }))}
+          />
+        </label>
+        <label className={styles['field']}>
+          <span>Server</span>
+          <input value={order.server} maxLength={60} onChange={(event) => setOrder((now) => ({ ...now, server: event.target.value }))} />
+        </label>
+      </div>
+    </>
+  );
+}

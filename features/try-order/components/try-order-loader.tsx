@@ -1,0 +1,15 @@
+'use client';
+
+import dynamic from 'next/dynamic';
+import type { Site } from '@/lib/domain/site/site';
+import styles from './try-order.module.css';
+
+/** The engine, the paper and the order pad arrive after first paint. */
+const TryOrder = dynamic(() => import('./try-order').then((loaded) => loaded.TryOrder), {
+  ssr: false,
+  loading: () => <p className={styles['loading']} role="status">Laying out the order pad</p>,
+});
+
+export function TryOrderLoader({ site }: { readonly site: Site }) {
+  return <TryOrder site={site} />;
+}

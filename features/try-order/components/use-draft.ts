@@ -1,0 +1,48 @@
+'use client';
+
+import { useEffect, useState } from 'react';
+import { emptyOrder } from '@/lib/domain/orders/edit-order';
+import type { Order } from '@/lib/domain/orders/order';
+import type { Site } from '@/lib/domain/site/site';
+import { draftSchema, type Draft } from '../schema';
+
+const keyOf = (site: Site): string => `tamis.try.${site.id}`;
+
+const freshDraft = (site: Site): Draft | null => {
+  const plan = site.live?.planId ?? site.plans[0]?.id;
+  return plan === undefined ? null : { plan, present: 'planned', order: emptyOrder(site) };
+};
+
+/** What this browser kept, if it still reads as a draft of a plan and a till that exist. */
+const keptDraft = (site: Site): Draft | null => {
+  try {
+    const kept = draftSchema.safeParse(JSON.parse(sessionStorage.getItem(keyOf(site)) ?? 'null'));
+    const stands = kept.success && site.plans.some(({ id }) => id === kept.data.plan) && site.tills.some(({ id }) => id === kept.data.order.till);
+    return stands ? kept.data : null;
+  } catch {
+    return null;
+  }
+};
+
+/** The order being written: kept over a reload, and the one before it can be brought back. */
+export const useDraft = (site: Site) => {
+  const [draft, setDraft] = useState<Draft | null>(() => keptDraft(site) ?? freshDraft(site));
+  const [before, setBefore] = useState<Order | null>(null);
+  useEffect(() => {
+    if (draft === null) return;
+    try {
+      sessionStorage.setItem(keyOf(site), JSON.stringify(draft));
+    } catch {
+      // A browser that keeps nothing still lets the order be tried.
+    }
+  }, [site, draft]);
+  const change = (part: Partial<Draft>): void => setDraft((now) => (now === null ? null : { ...now, ...part }));
+  const setOrder = (edit: (order: Order) => Order): void => setDraft((now) => (now === null ? null : { ...now, order: edit(now.order) }));
+  const replaceOrder = (order: Order): void => {
+    setBefore(draft === null || draft.order.lines.length === 0 ? null : draft.order);
+    change({ order });
+  };
+  return { draft, before, change, setOrder, replaceOrder };
+};
+
+export type DraftControl = ReturnType<typeof useDraft>;
