@@ -48,7 +48,7 @@ runUntilStopped(
     onStop(web.stop);
 
     say(`\nTamis is ready at ${settings.NEXTAUTH_URL}\n`);
-    say(await signInsFor(home, settings));
+    say(await signInsFor(settings));
     say(`\nMail that Tamis sends is kept in ${path.relative(root, home.mail)}. Ctrl-C stops everything.`);
     stopWhenOneEnds({ 'The database': database.child, 'The web server': web.child }, stop);
     return undefined;

@@ -11,13 +11,13 @@ export async function types() {
   return runCheck('types', node, [inPackages('typescript', 'bin', 'tsc'), '--noEmit', '-p', '.']);
 }
 
-export function vitest(name, projects, { report, env }) {
+export function vitest(name, projects, { report, env, names = [] }) {
   const parts = [inPackages('vitest', 'vitest.mjs'), 'run', ...projects.flatMap((project) => ['--project', project])];
-  return runCounted(name, node, [...parts, '--reporter=default', '--reporter=json', `--outputFile.json=${report}`], { report, env, count: countVitest });
+  return runCounted(name, node, [...parts, ...names, '--reporter=default', '--reporter=json', `--outputFile.json=${report}`], { report, env, count: countVitest });
 }
 
-export function browser({ report, env }) {
-  return runCounted('browser', node, [inPackages('@playwright', 'test', 'cli.js'), 'test', '--reporter=list,json'], {
+export function browser({ report, env, names }) {
+  return runCounted('browser', node, [inPackages('@playwright', 'test', 'cli.js'), 'test', ...names, '--reporter=list,json'], {
     report,
     env: { ...env, PLAYWRIGHT_JSON_OUTPUT_FILE: report },
     count: countPlaywright,
