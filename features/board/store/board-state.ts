@@ -1,6 +1,7 @@
 import type { Board } from '@/lib/domain/plans/board';
 import type { DropPlace } from '@/lib/domain/plans/drop';
 import type { PlanEdit } from '@/lib/domain/plans/edit';
+import type { ProofSummary } from '@/lib/domain/proof/summary';
 import type { PlanContent } from '@/lib/domain/site/plan';
 
 /** A step that can be taken back: what stood before it, and what it did in words. */
@@ -40,6 +41,16 @@ export type BoardState = {
   readonly lifted: Lifted | null;
   readonly notice: BoardNotice | null;
   readonly conflict: Conflict | null;
+  /** The latest proof; null where nobody has made one. */
+  readonly proof: ProofSummary | null;
+  /** Why the proof is older than the board; empty while it is not. */
+  readonly proofTrouble: string;
+  /** Names of the others who have this plan open. */
+  readonly others: readonly string[];
+  /** Cards that a finding points out. */
+  readonly shown: ReadonlySet<string>;
+  /** The card that was hung last. */
+  readonly settled: string | null;
   /** Card to put the focus on once it hangs. */
   readonly focus: string | null;
   /** What a screen reader is told next. */

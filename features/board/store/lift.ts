@@ -23,7 +23,7 @@ export const sayPlace = (place: DropPlace, site: Site): string =>
 
 /** Lifting one of several chosen cards lifts them all. */
 export const lift = (state: BoardState, id: string, by: Lifted['by'], site: Site): BoardState => {
-  const cards = state.chosen.has(id) ? [...state.chosen] : [id];
+  const cards = state.chosen.has(id) ? [id, ...[...state.chosen].filter((other) => other !== id)] : [id];
   const [card] = cardsNamed(state, [id]);
   if (card === undefined) return state;
   const names = sayCards(cardsNamed(state, cards));
@@ -57,7 +57,7 @@ export const cancelLift = (state: BoardState): BoardState => {
 };
 
 /** The card that shows after the drop what was lifted, so that the focus can follow it. */
-const landed = (state: BoardState, target: Card['target'], place: DropPlace): string | null =>
+export const landed = (state: BoardState, target: Card['target'], place: DropPlace): string | null =>
   allCards(state).find((card) => placeOf(card) === place && JSON.stringify(card.target) === JSON.stringify(target))?.id ?? null;
 
 /** Drops onto any place, by whatever way it was chosen: drag, keys or the list. */
@@ -68,7 +68,8 @@ export const dropCards = (state: BoardState, ids: readonly string[], place: Drop
   if (edit === null || first === undefined) return { ...cancelLift(state), said: say(state, `${sayCards(cards)} put back, nothing changed`) };
   const byKeys = state.lifted?.by === 'keyboard';
   const after = makeStep({ ...state, lifted: null }, [{ edit, words: describeEdit(edit, site, state.content) }], sayDropped(cards, place, site), site, newId);
-  return { ...after, focus: byKeys ? landed(after, first.target, place) : null };
+  const settled = landed(after, first.target, place);
+  return { ...after, settled, focus: byKeys ? settled : null };
 };
 
 export const drop = (store: BoardStore, newId: NewRuleId): void => {

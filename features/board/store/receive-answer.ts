@@ -36,3 +36,9 @@ export const receiveAnswer = (state: BoardState, answer: SaveAnswer, request: Sa
     case 'unreachable': return { ...state, saving: 'offline' };
   }
 };
+
+/** The page was read again: newer content takes over unless this person's own edits are still on their way. */
+export const receiveReading = (state: BoardState, reading: { version: number; content: PlanContent }, site: Site): BoardState =>
+  (reading.version <= state.version || state.pending.length > 0
+    ? state
+    : { ...withContent(state, reading.content, site), version: reading.version, saved: reading.content, past: [], future: [] });

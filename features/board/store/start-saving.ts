@@ -29,7 +29,6 @@ export const startSaving = (store: BoardStore, save: (request: SaveRequest) => P
     const request = { version, content, summary: summaryOf(pending) };
     const answer = await save(request);
     sending = false;
-    if (stopped) return;
     failures = answer.kind === 'unreachable' ? failures + 1 : 0;
     store.set((state) => receiveAnswer(state, answer, request, pending.length, store.site));
   };

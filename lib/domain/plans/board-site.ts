@@ -1,12 +1,12 @@
 import type { Item, Option, OptionGroup, Section } from '../site/menu';
-import type { Site } from '../site/site';
+import type { Area, Site } from '../site/site';
 import type { Station } from '../site/station';
 import type { Till } from '../site/till';
 
 /** What a plan is read against: names and who belongs where. Every `Site` is one; a browser gets no more than this. */
 export type BoardSite = {
   readonly stations: readonly Pick<Station, 'id' | 'name' | 'code' | 'kind' | 'layout' | 'position'>[];
-  readonly areas: Site['areas'];
+  readonly areas: readonly Pick<Area, 'id' | 'name'>[];
   readonly tills: readonly Pick<Till, 'id' | 'name' | 'area'>[];
   readonly menu: {
     readonly sections: readonly Pick<Section, 'id' | 'name'>[];

@@ -1,0 +1,74 @@
+'use client';
+
+import dynamic from 'next/dynamic';
+import type { ReactNode, RefObject } from 'react';
+import { useEffect, useRef, useState } from 'react';
+import type { BoardSite } from '@/lib/domain/plans/board-site';
+import type { ProofSummary } from '@/lib/domain/proof/summary';
+import type { PlanContent } from '@/lib/domain/site/plan';
+import { createBoardStore } from '../store/create-board-store';
+import type { BoardSettings } from './board-context';
+import { SettingsContext, StoreContext } from './board-context';
+import type { Grab } from './grab';
+import type { Opened } from './opened';
+import { OpenedContext } from './opened';
+import { receiveReading } from '../store/receive-answer';
+import { Said } from './said';
+import { SaverContext } from './saver-context';
+import { useKeptEdits } from './use-kept-edits';
+import { usePresence } from './use-presence';
+import { useProof } from './use-proof';
+import { useUndoKeys } from './use-undo-keys';
+
+const DragLayer = dynamic(() => import('./drag-layer'), { ssr: false });
+const OpenedLayer = dynamic(() => import('./opened-layer'), { ssr: false });
+
+type BoardRoomProps = {
+  readonly site: BoardSite;
+  readonly content: PlanContent;
+  readonly version: number;
+  readonly proof: ProofSummary;
+  readonly settings: BoardSettings;
+  readonly children: ReactNode;
+};
+
+/** Holds one plan's board: its state, its saving, and what arrives after the first paint. */
+export function BoardRoom({ site, content, version, proof, settings, children }: BoardRoomProps) {
+  const [store] = useState(() => createBoardStore(site, content, version, proof));
+  const [opened, setOpened] = useState<Opened>(null);
+  const [opening] = useState(() => ({ open: setOpened, close: () => setOpened(null) }));
+  const [painted, setPainted] = useState(false);
+  const grab: Grab = useRef(null);
+  const retry = useRef(() => undefined as void);
+  const [saver] = useState(() => ({ retry: () => retry.current() }));
+  useEffect(() => setPainted(true), []);
+  useEffect(() => store.readSite(site), [store, site]);
+  useEffect(() => store.set((state) => receiveReading(state, { content, version }, store.site)), [store, content, version]);
+  return (
+    <StoreContext value={store}>
+      <SettingsContext value={settings}>
+        <SaverContext value={saver}>
+        <OpenedContext value={opening}>
+          <BoardHands retry={retry} proof={proof} proven={content} />
+          {/* Presses bubble here from the cards, which are themselves buttons: nothing is hidden from the keyboard. */}
+          <div onMouseDown={(event) => grab.current?.(event)} onTouchStart={(event) => grab.current?.(event)}>{children}</div>
+          <Said />
+          {painted && settings.mayWrite ? <DragLayer grab={grab} /> : null}
+          {opened === null ? null : <OpenedLayer opened={opened} close={opening.close} />}
+        </OpenedContext>
+        </SaverContext>
+      </SettingsContext>
+    </StoreContext>
+  );
+}
+
+type BoardHandsProps = { readonly retry: RefObject<() => void>; readonly proof: ProofSummary; readonly proven: PlanContent };
+
+/** What works in the background: saving, who else is here, the proof, the keys for Undo. Draws nothing. */
+function BoardHands({ retry, proof, proven }: BoardHandsProps) {
+  useKeptEdits(retry);
+  usePresence();
+  useUndoKeys();
+  useProof(proof, proven);
+  return null;
+}
