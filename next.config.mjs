@@ -15,6 +15,7 @@ const contentSecurityPolicy = [
 export default {
   poweredByHeader: false,
   reactStrictMode: true,
+  experimental: { authInterrupts: true },
   serverExternalPackages: ['sequelize', 'mariadb', 'nodemailer', '@node-rs/argon2'],
   headers: async () => [
     {

@@ -15,7 +15,8 @@ const to = (column: string, table: string, onDelete = ''): string => `FOREIGN KE
 const cascade = 'ON DELETE CASCADE';
 
 const tables: readonly (readonly [string, readonly string[]])[] = [
-  ['people', [`id ${id} NOT NULL PRIMARY KEY`, 'email VARCHAR(254) NOT NULL UNIQUE', name(120).replace(/^/, 'name '), 'password_hash VARCHAR(255) NOT NULL', 'session_version INT NOT NULL DEFAULT 1', 'created_at DATETIME(3) NOT NULL']],
+  ['people', [`id ${id} NOT NULL PRIMARY KEY`, 'email VARCHAR(254) NOT NULL UNIQUE', `name ${name(120)}`, 'password_hash VARCHAR(255) NOT NULL', 'session_version INT NOT NULL DEFAULT 1', 'created_at DATETIME(3) NOT NULL']],
+  ['sessions', [`id ${id} NOT NULL PRIMARY KEY`, `person_id ${id} NOT NULL`, 'created_at DATETIME(3) NOT NULL', 'ended_at DATETIME(3)', 'FOREIGN KEY (person_id) REFERENCES people (id) ON DELETE CASCADE']],
   ['sites', [
     `id ${id} NOT NULL PRIMARY KEY`, `name ${name(120)}`, `place ${text(120)}`, `time_zone ${text(64)}`, `language ${text(35)}`, 'version INT NOT NULL DEFAULT 1', 'revision BIGINT NOT NULL DEFAULT 0',
     `subnet ${text(50)}`, `gateway ${text(45)}`, `pool_from ${text(45)}`, `pool_to ${text(45)}`,

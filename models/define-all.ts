@@ -34,6 +34,7 @@ import { defineLiveTillRow } from './live-till';
 import { defineDivertRow } from './divert';
 import { defineDivertStationRow } from './divert-station';
 import { defineChangeRow } from './change';
+import { defineSessionRow } from './session';
 
 /** Ties every model to one connection. References are the database's to hold; queries here read tables, not graphs. */
 export const defineAll = (sequelize: Sequelize): void => {
@@ -73,5 +74,6 @@ export const defineAll = (sequelize: Sequelize): void => {
     defineDivertRow,
     defineDivertStationRow,
     defineChangeRow,
+    defineSessionRow,
   ]) define(sequelize);
 };

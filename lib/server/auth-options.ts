@@ -1,0 +1,44 @@
+import 'server-only';
+import type { NextAuthOptions } from 'next-auth';
+import Credentials from 'next-auth/providers/credentials';
+import { env } from '@/lib/env';
+import { checkSignIn } from './check-sign-in';
+import { startSession, type SessionClaims } from './session';
+
+declare module 'next-auth' {
+  interface Session { claims?: SessionClaims }
+  interface User { claims?: SessionClaims }
+}
+declare module 'next-auth/jwt' {
+  interface JWT { claims?: SessionClaims }
+}
+
+const headerOf = (headers: unknown, name: string): string => {
+  const value = (headers as Record<string, string | string[] | undefined> | undefined)?.[name];
+  return (Array.isArray(value) ? value[0] : value) ?? '';
+};
+
+/** A fortnight: long enough for a tablet at the pass, and any session can be ended sooner. */
+const fortnightSeconds = 14 * 24 * 60 * 60;
+
+export const authOptions = (): NextAuthOptions => ({
+  secret: env().NEXTAUTH_SECRET,
+  session: { strategy: 'jwt', maxAge: fortnightSeconds },
+  pages: { signIn: '/sign-in', error: '/sign-in' },
+  providers: [
+    Credentials({
+      credentials: { email: {}, password: {} },
+      authorize: async (credentials, request) => {
+        const from = headerOf(request.headers, 'x-forwarded-for').split(',')[0]?.trim() ?? '';
+        const result = await checkSignIn(credentials?.email ?? '', credentials?.password ?? '', from);
+        if (result.kind === 'wait') throw new Error(`wait-${result.seconds}`);
+        if (result.kind === 'wrong') return null;
+        return { id: result.person.id, claims: await startSession(result.person) };
+      },
+    }),
+  ],
+  callbacks: {
+    jwt: ({ token, user }) => (user?.claims === undefined ? token : { ...token, claims: user.claims }),
+    session: ({ session, token }) => ({ expires: session.expires, ...(token.claims === undefined ? {} : { claims: token.claims }) }),
+  },
+});
