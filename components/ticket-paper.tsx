@@ -1,7 +1,7 @@
 import type { CSSProperties } from 'react';
 import type { Row, Run, TicketSheet } from '@/lib/domain/tickets/sheet';
 import { heightOf } from '@/lib/domain/tickets/sheet';
-import { cellsOf } from '@/lib/domain/tickets/cells';
+import { cellsOf, graphemesOf } from '@/lib/domain/tickets/cells';
 import styles from './ticket-paper.module.css';
 
 /** A printer moves paper at about this speed, a line of text is so tall: the picture feeds as fast. */
@@ -27,6 +27,13 @@ const classOf = (run: Run, sheet: TicketSheet): string => [
   run.width === 2 && run.height === 1 ? styles['wide'] : '',
 ].filter(Boolean).join(' ');
 
+const inOurFace = /^[\u0020-\u017f]*$/u;
+
+/** Lines of a frame, Cyrillic and other glyphs that our mono face lacks stand in a cell each. */
+function OnGrid({ text }: { readonly text: string }) {
+  return inOurFace.test(text) ? text : graphemesOf(text).map((grapheme, index) => <span key={index} className={styles['cell']}>{grapheme}</span>);
+}
+
 function Words({ run, sheet, selectedLine, onSelect }: Selecting & { readonly run: Run; readonly sheet: TicketSheet }) {
   const className = classOf(run, sheet);
   const [line] = run.sourceLines;
@@ -34,14 +41,14 @@ function Words({ run, sheet, selectedLine, onSelect }: Selecting & { readonly ru
     const selected = selectedLine !== null && selectedLine !== undefined && run.sourceLines.includes(selectedLine);
     return (
       <button type="button" className={`${className} ${styles['name'] ?? ''} ${selected ? (styles['selected'] ?? '') : ''}`} aria-pressed={selected} onClick={() => onSelect(line)}>
-        {run.text}
+        <OnGrid text={run.text} />
       </button>
     );
   }
   if (run.emphasis === 'allergy') {
-    return <strong className={className} style={{ '--cells': cellsOf(run.text) } as CSSProperties}><span>{run.text}</span></strong>;
+    return <strong className={className} style={{ '--cells': cellsOf(run.text) } as CSSProperties}><span><OnGrid text={run.text} /></span></strong>;
   }
-  return <span className={className}>{run.text}</span>;
+  return <span className={className}><OnGrid text={run.text} /></span>;
 }
 
 function PaperRow({ row, ...rest }: Selecting & { readonly row: Row; readonly sheet: TicketSheet }) {

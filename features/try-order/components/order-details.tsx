@@ -19,7 +19,7 @@ const firstLetterLarge = (words: string): string => words.slice(0, 1).toUpperCas
 type DetailsProps = { readonly site: Site; readonly draft: Draft } & Pick<DraftControl, 'change' | 'setOrder'>;
 
 function Under({ site, draft, change }: Omit<DetailsProps, 'setOrder'>) {
-  const states = [['planned', 'All open, all printers up'], ['now', 'As the kitchen is now']] as const;
+  const states = [['planned', 'As planned'], ['now', 'As it is now']] as const;
   return (
     <div className={styles['under']}>
       <label className={styles['field']}>

@@ -20,19 +20,16 @@ import { SaidAllergies } from './said-allergies';
 import { timeOn } from './time-on';
 import styles from './try-order.module.css';
 import { useDraft, type DraftControl } from './use-draft';
-import { Verdict } from './verdict';
+import { headline, Verdict } from './verdict';
 import { WhyLine } from './why-line';
 import { contextWords, counted } from './words';
 
 type PadProps = { readonly site: Site; readonly plan: Plan; readonly draft: Draft; readonly control: DraftControl };
 
-const firstBroken = (lines: ReturnType<typeof tryOrder>['lines']): number | null =>
-  lines.find(({ outcome }) => outcome === 'lost')?.line ?? lines.find(({ outcome }) => outcome === 'part lost')?.line ?? null;
-
 function Pad({ site, plan, draft, control }: PadProps) {
   const { order } = draft;
   const { change, setOrder, replaceOrder, before } = control;
-  const [selected, setSelected] = useState<number | 'closed' | null>(null);
+  const [selected, setSelected] = useState<number | null>(null);
   const [editing, setEditing] = useState<number | null>(null);
   const [openedAt] = useState(() => timeOn(site.timeZone, new Date()));
   const ready = useMemo(() => readyOrders(site, plan), [site, plan]);
@@ -40,7 +37,7 @@ function Pad({ site, plan, draft, control }: PadProps) {
     () => tryOrder(site, plan, draft.present === 'now' ? presentOf(site) : allWell, order, { time: openedAt }),
     [site, plan, draft.present, order, openedAt],
   );
-  const shown = selected === 'closed' ? null : selected ?? firstBroken(tried.lines);
+  const verdict = headline(tried);
   const empty = order.lines.length === 0;
 
   const leaveLine = (): void => {
@@ -58,7 +55,7 @@ function Pad({ site, plan, draft, control }: PadProps) {
     setSelected(order.lines.length);
   };
   return (
-    <div className={styles['lane']}>
+    <div className={`${styles['lane'] ?? ''} ${empty ? (styles['emptyLane'] ?? '') : ''}`}>
       <section className={styles['order']} aria-label="Order">
         <OrderDetails site={site} draft={draft} change={change} setOrder={setOrder} />
         <div className={styles['orderHead']}>
@@ -67,7 +64,7 @@ function Pad({ site, plan, draft, control }: PadProps) {
         </div>
         <ItemSearch site={site} plan={plan} onAdd={add} />
         <SaidAllergies order={order} setOrder={setOrder} />
-        <OrderLines site={site} order={order} tried={tried} selected={shown} editing={editing} onSelect={setSelected} onEdit={setEditing} onRemoved={leaveLine} setOrder={setOrder} />
+        <OrderLines site={site} order={order} tried={tried} selected={selected} editing={editing} onSelect={setSelected} onEdit={setEditing} onRemoved={leaveLine} setOrder={setOrder} />
         {empty ? null : (
           <details className={styles['instead']}>
             <summary>Take a ready order instead</summary>
@@ -89,8 +86,8 @@ function Pad({ site, plan, draft, control }: PadProps) {
         ) : (
           <>
             <Verdict site={site} order={order} tried={tried} context={contextWords(site, order, plan.name)} onSelect={setSelected} />
-            <Printed site={site} tried={tried} selected={shown} onSelect={setSelected} />
-            {shown === null ? null : <WhyLine site={site} order={order} tried={tried} line={shown} onClose={() => setSelected('closed')} />}
+            <Printed site={site} tried={tried} selected={selected} onSelect={setSelected} />
+            {selected === null ? <a href="#tickets" className={`${styles['jump'] ?? ''} ${styles[verdict.tone] ?? ''}`}>{verdict.words}<span>See</span></a> : <WhyLine site={site} order={order} tried={tried} line={selected} onClose={() => setSelected(null)} />}
           </>
         )}
       </div>

@@ -8,7 +8,8 @@ import { counted, itemName, sentencesOf } from './words';
 
 type VerdictProps = { readonly site: Site; readonly order: Order; readonly tried: TriedOrder; readonly context: string; readonly onSelect: (line: number) => void };
 
-const headline = (tried: TriedOrder): { readonly tone: 'well' | 'look' | 'lost'; readonly words: string } => {
+/** The outcome of the whole order in one sentence. */
+export const headline = (tried: TriedOrder): { readonly tone: 'well' | 'look' | 'lost'; readonly words: string } => {
   const whole = tried.refusals.find(({ line }) => line === null);
   if (whole !== undefined) return { tone: 'look', words: 'This order cannot be sent' };
   const lost = tried.lines.filter(({ outcome }) => outcome === 'lost').length;
@@ -29,32 +30,44 @@ const unprintableWords = (tried: TriedOrder): readonly { readonly words: string;
   return [...new Map(said.map((one) => [one.words, one])).values()].toSorted((left, right) => Number(right.allergy) - Number(left.allergy));
 };
 
+type BrokenLine = { readonly first: number; readonly name: string; readonly quantity: number; readonly reasons: readonly string[] };
+
+/** Lost lines of the same item for the same reasons are one entry. */
+const brokenLines = (site: Site, order: Order, tried: TriedOrder): readonly BrokenLine[] => {
+  const entries = new Map<string, BrokenLine>();
+  for (const { line, outcome } of tried.lines) {
+    const entry = order.lines[line];
+    if (entry === undefined || (outcome !== 'lost' && outcome !== 'part lost')) continue;
+    const reasons = sentencesOf(tried, line, site).filter(({ tone, step }) => tone === 'lost' && step !== 7).map(({ subject, rest }) => subject + rest);
+    const name = itemName(site, entry);
+    const key = JSON.stringify([name, reasons]);
+    const before = entries.get(key);
+    entries.set(key, { first: before?.first ?? line, name, reasons, quantity: (before?.quantity ?? 0) + entry.quantity });
+  }
+  return [...entries.values()];
+};
+
 /** What becomes of the order, in one sentence of large type, then what is lost and why. */
 export function Verdict({ site, order, tried, context, onSelect }: VerdictProps) {
   const { tone, words } = headline(tried);
-  const broken = tried.lines.filter(({ outcome }) => outcome === 'lost' || outcome === 'part lost');
+  const broken = brokenLines(site, order, tried);
   const refusedLines = new Set([...tried.refusals.flatMap(({ line }) => line ?? []), ...tried.lines.filter(({ outcome }) => outcome === 'refused').map(({ line }) => line)]).size;
   return (
-    <section className={styles['verdict']} aria-live="polite">
+    <section id="tickets" className={styles['verdict']} aria-live="polite">
       <h2 className={styles[tone]}>
         <span className={styles['shape']} aria-hidden="true" />
         {words}
       </h2>
-      <p className={styles['context']}>{context}{refusedLines > 0 ? `. ${counted(refusedLines, 'line is', 'lines are')} refused and sent nowhere.` : ''}</p>
+      <p className={styles['context']}>{context}. Press a dish, here or on its ticket, to see why it prints there.{refusedLines > 0 ? ` ${counted(refusedLines, 'line is', 'lines are')} refused and sent nowhere.` : ''}</p>
       {tried.refusals.filter(({ line }) => line === null).map(({ message }) => <p key={message} className={styles['look']}>{message}</p>)}
       {broken.length === 0 ? null : (
         <ul className={styles['losses']}>
-          {broken.map(({ line }) => {
-            const entry = order.lines[line];
-            if (entry === undefined) return null;
-            const reasons = sentencesOf(tried, line, site).filter((sentence) => sentence.tone === 'lost' && sentence.step !== 7);
-            return (
-              <li key={line}>
-                <button type="button" onClick={() => onSelect(line)}>{entry.quantity} {itemName(site, entry)}</button>
-                {reasons.map(({ subject, rest }) => <span key={subject + rest}> {subject}{rest}</span>)}
-              </li>
-            );
-          })}
+          {broken.map(({ first, name, quantity, reasons }) => (
+            <li key={first}>
+              <button type="button" onClick={() => onSelect(first)}>{quantity} {name}</button>
+              {reasons.join(' ')}
+            </li>
+          ))}
         </ul>
       )}
       {unprintableWords(tried).map((one) => <p key={one.words} className={styles[one.allergy ? 'lost' : 'look']}>{one.words}</p>)}
