@@ -1,0 +1,49 @@
+import type { Printer } from '@/lib/domain/site/printer';
+import type { Site } from '@/lib/domain/site/site';
+import type { PrinterInput } from './schema';
+import { codePageWords, connectionWords, emphasisWords, stageWords } from './words';
+
+export const fieldWords: Readonly<Record<keyof PrinterInput, string>> = {
+  name: 'Printer name', model: 'Model', serial: 'Serial number', connection: 'Connection', hostTill: 'Plugged into', address: 'Address', mask: 'Mask', gateway: 'Gateway', port: 'Port',
+  mac: 'MAC address', presentAddress: 'Answers now at', rollWidthMm: 'Roll', columns: 'Characters on a line', codePage: 'Code page', emphasis: 'Allergies stand out by', cutter: 'Cutter', buzzer: 'Buzzer',
+  backup: 'Backup', joinsStations: 'One ticket for all its stations', sharedPoints: 'Hangs on', stage: 'Stage',
+};
+
+export type Naming = Pick<Site, 'tills' | 'printers' | 'sharedPoints'>;
+export type Difference = { readonly field: keyof PrinterInput; readonly label: string; readonly from: string; readonly to: string };
+
+const nameIn = (rows: readonly { readonly id: string; readonly name: string }[], id: string | null): string =>
+  (id === null ? 'none' : rows.find((row) => row.id === id)?.name ?? 'one that is gone');
+
+const sayValue = (printer: Printer | PrinterInput, field: keyof PrinterInput, naming: Naming): string => {
+  switch (field) {
+    case 'connection': return connectionWords[printer.connection];
+    case 'hostTill': return nameIn(naming.tills, printer.hostTill);
+    case 'backup': return nameIn(naming.printers, printer.backup);
+    case 'sharedPoints': return printer.sharedPoints.map((point) => nameIn(naming.sharedPoints, point)).join(', ') || 'nothing';
+    case 'rollWidthMm': return `${printer.rollWidthMm} mm`;
+    case 'codePage': return codePageWords[printer.codePage];
+    case 'emphasis': return emphasisWords[printer.emphasis];
+    case 'stage': return stageWords[printer.stage];
+    case 'cutter': case 'buzzer': case 'joinsStations': return printer[field] ? 'yes' : 'no';
+    default: return String(printer[field]) || 'nothing';
+  }
+};
+
+const sameValue = (left: unknown, right: unknown): boolean =>
+  Array.isArray(left) && Array.isArray(right) ? left.toSorted().join('\n') === right.toSorted().join('\n') : left === right;
+
+/** What differs between two states of one printer, in words. */
+export const printerDifferences = (from: Printer | PrinterInput, to: Printer | PrinterInput, naming: Naming): readonly Difference[] =>
+  (Object.keys(fieldWords) as (keyof PrinterInput)[])
+    .filter((field) => !sameValue(from[field], to[field]))
+    .map((field) => ({ field, label: fieldWords[field], from: sayValue(from, field, naming), to: sayValue(to, field, naming) }));
+
+/** One line of history: "LARDER 1 renamed to LARDER1", "GRILL1: address 10.20.30.201 to 10.20.30.211". */
+export const sayPrinterChange = (from: Printer, to: Printer | PrinterInput, naming: Naming): string => {
+  const differences = printerDifferences(from, to, naming);
+  const [only] = differences;
+  if (only === undefined) return `${to.name} saved without a change`;
+  if (differences.length === 1 && only.field === 'name') return `${from.name} renamed to ${to.name}`;
+  return `${to.name}: ${differences.map(({ label, from: was, to: now }) => `${label.toLowerCase().replace('mac', 'MAC')} ${was} to ${now}`).join(', ')}`;
+};
