@@ -10,7 +10,7 @@ export function TryOrderPage({ site }: { readonly site: Site }) {
         <h1 className={styles['title']}>Try an order</h1>
         <span className={styles['practice']}>Nothing here reaches the kitchen</span>
       </header>
-      <TryOrderLoader site={site} />
+      <TryOrderLoader site={{ ...site, contacts: [] }} />
     </>
   );
 }

@@ -1,0 +1,10 @@
+import type { Metadata } from 'next';
+import { TryOrderPage } from '@/features/try-order/components/try-order-page';
+import { openSite } from '@/lib/server/page-access';
+
+export const metadata: Metadata = { title: 'Try an order' };
+
+export default async function Page({ params }: { readonly params: Promise<{ readonly site: string }> }) {
+  const { site } = await openSite((await params).site, 'order.try');
+  return <TryOrderPage site={site} />;
+}

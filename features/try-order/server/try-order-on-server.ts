@@ -1,0 +1,18 @@
+import 'server-only';
+import { tryOrder, type TriedOrder } from '@/lib/domain/orders/try-order';
+import { allWell, presentOf } from '@/lib/domain/site/present';
+import { AppError } from '@/lib/http/errors';
+import { mustBeAllowed, type Actor } from '@/lib/server/actor';
+import { loadSite } from '@/lib/server/site-snapshot';
+import type { TryOrderInput } from '../schema';
+
+/** Tries an order with the engine that the browser uses, on the site as the database has it now. Nothing is written. */
+export const tryOrderOnServer = async ({ membership, siteId, plan: planId, present, order, time }: Actor & TryOrderInput): Promise<TriedOrder> => {
+  mustBeAllowed(membership, 'order.try');
+  const site = await loadSite(siteId);
+  const plan = site?.plans.find(({ id }) => id === planId);
+  if (site === null || plan === undefined) {
+    throw new AppError('not-found', 'This plan is not there any more, so the order was not tried. Choose another plan.');
+  }
+  return tryOrder(site, plan, present === 'now' ? presentOf(site) : allWell, order, { time });
+};
