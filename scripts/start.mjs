@@ -20,7 +20,7 @@ import { startWeb } from './house/web.mjs';
 const isDevelopment = process.argv.includes('--dev');
 
 runUntilStopped(
-  async ({ onStop, stop }) => {
+  async ({ onStop, fail }) => {
     const home = homeAt(path.join(root, '.data'));
     const host = process.env.HOST || loopback;
     const port = readPort(process.env.PORT, 3000);
@@ -50,7 +50,7 @@ runUntilStopped(
     say(`\nTamis is ready at ${settings.NEXTAUTH_URL}\n`);
     say(await signInsFor(settings));
     say(`\nMail that Tamis sends is kept in ${path.relative(root, home.mail)}. Ctrl-C stops everything.`);
-    stopWhenOneEnds({ 'The database': database.child, 'The web server': web.child }, stop);
+    failWhenOneEnds({ 'The database': database.child, 'The web server': web.child }, fail);
     return undefined;
   },
   { codeWhenAsked: 0 },
@@ -65,12 +65,7 @@ async function openDatabase(home, secrets, watch) {
 }
 
 /** Half of Tamis is no Tamis: when one part ends by itself, say so and stop the rest. */
-function stopWhenOneEnds(parts, stop) {
-  for (const [name, child] of Object.entries(parts)) {
-    if (!child) continue;
-    void ended(child).then((code) => {
-      say(`\n${name} ended by itself (${code}), so Tamis stops; its last words are in .data/log.`);
-      return stop(1);
-    });
-  }
+function failWhenOneEnds(parts, fail) {
+  for (const [name, child] of Object.entries(parts))
+    if (child) void ended(child).then((code) => fail(`${name} ended by itself (${code}), so Tamis stopped; its last words are in .data/log.`));
 }

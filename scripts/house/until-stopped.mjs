@@ -6,8 +6,8 @@ import { sentenceOf } from './sentence.mjs';
 
 /**
  * Runs `work` and undoes what it started, last first, when it is done, when it fails or when somebody asks this process to stop.
- * `work` is given `onStop(undo)` and `stop(code)`; it resolves to an exit code to end at once, or to undefined to stay.
- * @param {(house: { onStop: (undo: () => unknown) => void, stop: (code: number) => Promise<void> }) => Promise<number | undefined>} work
+ * `work` is given `onStop(undo)` and `fail(sentence)`; it resolves to an exit code to end at once, or to undefined to stay.
+ * @param {(house: { onStop: (undo: () => unknown) => void, fail: (sentence: string) => void }) => Promise<number | undefined>} work
  * @param {{ codeWhenAsked: number }} options the exit code after Ctrl-C: 0 where that is the way to end
  */
 export function runUntilStopped(work, { codeWhenAsked }) {
@@ -28,13 +28,15 @@ export function runUntilStopped(work, { codeWhenAsked }) {
       void stop(codeWhenAsked);
     });
 
-  work({ onStop: (step) => undo.push(step), stop }).then(
+  function fail(sentence) {
+    if (isStopping) return;
+    process.stderr.write(`\n${sentence}\n`);
+    void stop(1);
+  }
+
+  work({ onStop: (step) => undo.push(step), fail }).then(
     (code) => (code === undefined ? undefined : stop(code)),
-    (error) => {
-      if (isStopping) return;
-      process.stderr.write(`\n${sentenceOf(error, homeAt(root).folder) ?? error?.stack ?? error}\n`);
-      void stop(1);
-    },
+    (error) => fail(sentenceOf(error, homeAt(root).folder) ?? error?.stack ?? String(error)),
   );
 }
 
