@@ -4,7 +4,7 @@ import type { Site } from '@/lib/domain/site/site';
 import { siteMaskOf } from '@/lib/domain/addresses/device-findings';
 import { nextFreeAddress } from '@/lib/domain/addresses/next-free-address';
 import type { DraftSite } from '@/lib/domain/checks/check-draft';
-import { usualColumns } from './words';
+import { usualColumns } from '@/lib/domain/devices/printer-words';
 import type { PrinterInput } from './schema';
 
 /** What the form starts with: the site's own mask and router, and the next free address. */

@@ -2,6 +2,7 @@ import 'server-only';
 import type { Transaction } from 'sequelize';
 import { normaliseMac } from '@/lib/domain/addresses/mac';
 import { printerTestsStand, stageWithoutTests } from '@/lib/domain/checks/test-stands';
+import { sayPrinterChange } from '@/lib/domain/devices/printer-differences';
 import type { Printer } from '@/lib/domain/site/printer';
 import type { Site } from '@/lib/domain/site/site';
 import { PrinterRow } from '@/models/printer';
@@ -57,17 +58,16 @@ export type PrinterWrite = {
   readonly after: Printer;
   /** The version the change was made from. */
   readonly version: number;
-  readonly summary: string;
 };
 
 /** Writes a printer as it is to be. Tests that were printed on what it was before do not count for what it is now. */
-export const writePrinter = async (transaction: Transaction, { site, personId, before, after, version, summary }: PrinterWrite): Promise<{ readonly id: string; readonly version: number }> => {
+export const writePrinter = async (transaction: Transaction, { site, personId, before, after, version }: PrinterWrite): Promise<{ readonly id: string; readonly version: number }> => {
   const siteId = site.id;
   if (before.version === version) mustFitSite(site, after);
   const row = await updateVersioned(PrinterRow, { siteId, id: before.id, version }, { ...printerValues(after), stage: stageAfter(before, after) }, transaction);
   await writePrinterPoints(transaction, siteId, after);
   if (!printerTestsStand(before, after)) await QueueRow.update({ testPrintedAt: null }, { where: { siteId, printerId: before.id }, transaction });
   if (before.name !== after.name) await renameReservations(transaction, siteId, before.name, after.name);
-  await recordChange(transaction, { siteId, personId, action: 'printer.updated', subjectKind: 'printer', subjectId: before.id, summary, before, after });
+  await recordChange(transaction, { siteId, personId, action: 'printer.updated', subjectKind: 'printer', subjectId: before.id, summary: sayPrinterChange(before, after, site), before, after });
   return { id: before.id, version: row.version };
 };

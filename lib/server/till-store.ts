@@ -1,6 +1,7 @@
 import 'server-only';
 import type { Transaction } from 'sequelize';
 import { queueTestStands } from '@/lib/domain/checks/test-stands';
+import { sayTillChange } from '@/lib/domain/devices/till-differences';
 import type { Site } from '@/lib/domain/site/site';
 import type { Queue, Till } from '@/lib/domain/site/till';
 import { QueueRow } from '@/models/queue';
@@ -53,14 +54,13 @@ export type TillWrite = {
   readonly after: Till;
   /** The version the change was made from. */
   readonly version: number;
-  readonly summary: string;
 };
 
-export const writeTill = async (transaction: Transaction, { site, personId, before, after, version, summary }: TillWrite): Promise<{ readonly id: string; readonly version: number }> => {
+export const writeTill = async (transaction: Transaction, { site, personId, before, after, version }: TillWrite): Promise<{ readonly id: string; readonly version: number }> => {
   const siteId = site.id;
   if (before.version === version) tillMustFitSite(site, after);
   const row = await updateVersioned(TillRow, { siteId, id: before.id, version }, tillValues(after), transaction);
   await writeTillLists(transaction, siteId, after, before);
-  await recordChange(transaction, { siteId, personId, action: 'till.updated', subjectKind: 'till', subjectId: before.id, summary, before, after });
+  await recordChange(transaction, { siteId, personId, action: 'till.updated', subjectKind: 'till', subjectId: before.id, summary: sayTillChange(before, after, site), before, after });
   return { id: before.id, version: row.version };
 };

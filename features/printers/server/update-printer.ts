@@ -2,7 +2,6 @@ import 'server-only';
 import { actIn, type Actor } from '@/lib/server/actor';
 import { readPrinter } from '@/lib/server/devices-of-site';
 import { writePrinter } from '@/lib/server/printer-store';
-import { sayPrinterChange } from '../differences';
 import { printerOfInput } from '../printer-of-input';
 import type { PrinterInput } from '../schema';
 
@@ -13,5 +12,5 @@ export const updatePrinter = (actor: Actor, { printer: id, version, input }: Pri
   actIn(actor, 'printer.write', async (transaction) => {
     const { site, printer: before } = await readPrinter(transaction, actor.siteId, id);
     const after = printerOfInput(input, id, before);
-    return writePrinter(transaction, { site, personId: actor.person.id, before, after, version, summary: sayPrinterChange(before, after, site) });
+    return writePrinter(transaction, { site, personId: actor.person.id, before, after, version });
   });

@@ -2,7 +2,6 @@ import 'server-only';
 import { actIn, type Actor } from '@/lib/server/actor';
 import { readTill } from '@/lib/server/devices-of-site';
 import { writeTill } from '@/lib/server/till-store';
-import { sayTillChange } from '../differences';
 import type { TillInput } from '../schema';
 import { tillOfInput } from '../till-of-input';
 
@@ -13,5 +12,5 @@ export const updateTill = (actor: Actor, { till: id, version, input }: TillUpdat
   actIn(actor, 'till.write', async (transaction) => {
     const { site, till: before } = await readTill(transaction, actor.siteId, id);
     const after = tillOfInput(input, id, before.version);
-    return writeTill(transaction, { site, personId: actor.person.id, before, after, version, summary: sayTillChange(before, after, site) });
+    return writeTill(transaction, { site, personId: actor.person.id, before, after, version });
   });

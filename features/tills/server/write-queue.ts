@@ -4,7 +4,6 @@ import type { Till } from '@/lib/domain/site/till';
 import { actIn, type Actor } from '@/lib/server/actor';
 import { readTill } from '@/lib/server/devices-of-site';
 import { writeTill } from '@/lib/server/till-store';
-import { sayTillChange } from '../differences';
 import type { QueueInput } from '../schema';
 
 type QueueKey = { readonly till: string; readonly printer: string };
@@ -13,7 +12,7 @@ const saveQueues = (actor: Actor, { till: id }: QueueKey, change: (till: Till) =
   actIn(actor, 'till.write', async (transaction) => {
     const { site, till: before } = await readTill(transaction, actor.siteId, id);
     const after = { ...before, queues: change(before) };
-    return writeTill(transaction, { site, personId: actor.person.id, before, after, version: before.version, summary: sayTillChange(before, after, site) });
+    return writeTill(transaction, { site, personId: actor.person.id, before, after, version: before.version });
   });
 
 /** Writes down one printer as it was found on a till. The newest look at the till is right, so no version is asked for. */

@@ -1,5 +1,5 @@
-import type { OrderType } from '@/lib/domain/site/order-types';
-import type { AddressSource, PortKind, TillKind, TillSystem } from '@/lib/domain/site/till';
+import type { OrderType } from '../site/order-types';
+import type { AddressSource, PortKind, TillKind, TillSystem } from '../site/till';
 
 export const kindWords: Readonly<Record<TillKind, string>> = { fixed: 'Fixed till', handheld: 'Handheld', online: 'Online channel' };
 export const systemWords: Readonly<Record<TillSystem, string>> = { windows: 'Windows', linux: 'Linux', other: 'Other' };

@@ -1,4 +1,4 @@
-import type { CodePage, Connection, Emphasis, PrinterStage, RollWidthMm } from '@/lib/domain/site/printer';
+import type { CodePage, Connection, Emphasis, PrinterStage, RollWidthMm } from '../site/printer';
 
 export const connectionWords: Readonly<Record<Connection, string>> = { network: 'Network', usb: 'USB', serial: 'Serial', parallel: 'Parallel' };
 

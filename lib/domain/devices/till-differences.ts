@@ -1,24 +1,24 @@
-import type { Site } from '@/lib/domain/site/site';
-import type { Queue, Till } from '@/lib/domain/site/till';
-import { kindWords, orderTypeLabels, portWords, sourceWords, systemWords } from './words';
+import type { Site } from '../site/site';
+import type { Queue, Till } from '../site/till';
+import { kindWords, orderTypeLabels, portWords, sourceWords, systemWords } from './till-words';
 
-type TillField = Exclude<keyof Till, 'id' | 'version'>;
+export type TillField = Exclude<keyof Till, 'id' | 'version'>;
 
-export const fieldWords: Readonly<Record<TillField, string>> = {
+export const tillFieldWords: Readonly<Record<TillField, string>> = {
   name: 'Name', kind: 'Kind', area: 'Area', orderTypes: 'Sends orders', system: 'System', address: 'Address', mask: 'Mask', addressSource: 'Address comes', adapter: 'Wired adapter',
   sharedPoints: 'Hangs on', defaultPrinter: 'Default printer', printsThrough: 'Prints through', queues: 'Printers',
 };
 
-export type Naming = Pick<Site, 'areas' | 'tills' | 'printers' | 'sharedPoints'>;
-export type Difference = { readonly field: TillField; readonly label: string; readonly from: string; readonly to: string };
+export type TillNaming = Pick<Site, 'areas' | 'tills' | 'printers' | 'sharedPoints'>;
+export type TillDifference = { readonly field: TillField; readonly label: string; readonly from: string; readonly to: string };
 
 const nameIn = (rows: readonly { readonly id: string; readonly name: string }[], id: string | null): string =>
   (id === null ? 'none' : rows.find((row) => row.id === id)?.name ?? 'one that is gone');
 
-const sayQueue = (queue: Queue, naming: Naming): string =>
+const sayQueue = (queue: Queue, naming: TillNaming): string =>
   `${nameIn(naming.printers, queue.printer)} typed ${queue.typedName || 'nothing'} on ${portWords[queue.portKind].toLowerCase()} ${queue.portAddress}${queue.testPrintedAt === null ? '' : ', tested'}`.trim();
 
-const sayValue = (till: Till, field: TillField, naming: Naming): string => {
+const sayValue = (till: Till, field: TillField, naming: TillNaming): string => {
   switch (field) {
     case 'kind': return kindWords[till.kind];
     case 'area': return nameIn(naming.areas, till.area);
@@ -40,12 +40,12 @@ const comparable = (till: Till, field: TillField): string => {
 };
 
 /** What differs between two states of one till, in words. */
-export const tillDifferences = (from: Till, to: Till, naming: Naming): readonly Difference[] =>
-  (Object.keys(fieldWords) as TillField[])
+export const tillDifferences = (from: Till, to: Till, naming: TillNaming): readonly TillDifference[] =>
+  (Object.keys(tillFieldWords) as TillField[])
     .filter((field) => comparable(from, field) !== comparable(to, field))
-    .map((field) => ({ field, label: fieldWords[field], from: sayValue(from, field, naming), to: sayValue(to, field, naming) }));
+    .map((field) => ({ field, label: tillFieldWords[field], from: sayValue(from, field, naming), to: sayValue(to, field, naming) }));
 
-const sayQueueChanges = (from: Till, to: Till, naming: Naming): readonly string[] => {
+const sayQueueChanges = (from: Till, to: Till, naming: TillNaming): readonly string[] => {
   const name = (queue: Queue): string => nameIn(naming.printers, queue.printer);
   const before = new Map(from.queues.map((queue) => [queue.printer, queue]));
   const after = new Set(to.queues.map((queue) => queue.printer));
@@ -60,7 +60,7 @@ const sayQueueChanges = (from: Till, to: Till, naming: Naming): readonly string[
 };
 
 /** One line of history: "Till 1: address 10.20.30.61 to 10.20.30.71, PASS1 installed". */
-export const sayTillChange = (from: Till, to: Till, naming: Naming): string => {
+export const sayTillChange = (from: Till, to: Till, naming: TillNaming): string => {
   const parts = tillDifferences(from, to, naming).flatMap(({ field, label, from: was, to: now }) =>
     (field === 'queues' ? sayQueueChanges(from, to, naming) : [`${label.toLowerCase()} ${was} to ${now}`]));
   return parts.length === 0 ? `${to.name} saved without a change` : `${to.name}: ${parts.join(', ')}`;
