@@ -3,7 +3,7 @@
 import { useEffect } from 'react';
 import { fetchPlan } from '../api/fetch-plan';
 import { pingPresence } from '../api/ping-presence';
-import { takeTheirs } from '../store/receive-answer';
+import { receiveReading, takeTheirs } from '../store/receive-answer';
 import { useSettings, useStore } from './board-context';
 
 const pingEveryMs = 20_000;
@@ -22,11 +22,11 @@ export const usePresence = (): void => {
       const heard = await pingPresence(siteId, planId);
       if (gone || heard === null) return;
       store.set((state) => (JSON.stringify(state.others) === JSON.stringify(heard.others) ? state : { ...state, others: heard.others }));
-      const idle = (): boolean => store.get().pending.length === 0 && store.get().lifted === null && heard.version > store.get().version;
+      const idle = (): boolean => store.get().pending.length === 0 && store.get().lifted === null && heard.newest > store.get().version;
       if (!idle()) return;
       const theirs = await fetchPlan(siteId, planId);
       if (gone || theirs === null || !idle()) return;
-      store.set((state) => takeTheirs(state, { ...theirs, by: theirs.changedBy }, store.site));
+      store.set((state) => (theirs.byYou ? receiveReading(state, theirs, store.site) : takeTheirs(state, { ...theirs, by: theirs.changedBy }, store.site)));
     };
     void ping();
     const timer = setInterval(() => void ping(), pingEveryMs);
