@@ -1,6 +1,7 @@
 'use client';
 
 import { fromTill } from '@/lib/domain/orders/edit-order';
+import type { Order } from '@/lib/domain/orders/order';
 import { asId } from '@/lib/domain/site/ids';
 import type { PlanId, TillId } from '@/lib/domain/site/ids';
 import { orderTypeWords, type OrderType } from '@/lib/domain/site/order-types';
@@ -21,7 +22,7 @@ type DetailsProps = { readonly site: Site; readonly draft: Draft } & Pick<DraftC
 function Under({ site, draft, change }: Omit<DetailsProps, 'setOrder'>) {
   const states = [['planned', 'As planned'], ['now', 'As it is now']] as const;
   return (
-    <div className={styles['under']}>
+    <>
       <label className={styles['field']}>
         <span>Plan</span>
         <select value={draft.plan} onChange={(event) => change({ plan: asId<PlanId>(event.target.value) })}>
@@ -29,7 +30,7 @@ function Under({ site, draft, change }: Omit<DetailsProps, 'setOrder'>) {
         </select>
       </label>
       <fieldset className={styles['choice']}>
-        <legend>State of the kitchen</legend>
+        <legend>Kitchen</legend>
         {states.map(([value, words]) => (
           <label key={value}>
             <input type="radio" name="present" value={value} checked={draft.present === value} onChange={() => change({ present: value })} />
@@ -37,59 +38,78 @@ function Under({ site, draft, change }: Omit<DetailsProps, 'setOrder'>) {
           </label>
         ))}
       </fieldset>
-    </div>
+    </>
   );
 }
 
-/** Under which plan and state, from which till, for whom. */
-export function OrderDetails({ site, draft, change, setOrder }: DetailsProps) {
-  const { order } = draft;
+type OrderPart = Pick<DetailsProps, 'site' | 'setOrder'> & { readonly order: Order };
+
+function FromWhere({ site, order, setOrder }: OrderPart) {
   const till = site.tills.find(({ id }) => id === order.till);
-  const areaName = site.areas.find(({ id }) => id === till?.area)?.name ?? '';
+  const areaName = site.areas.find(({ id }) => id === till?.area)?.name ?? 'The till’s own';
   return (
     <>
-      <Under site={site} draft={draft} change={change} />
-      <div className={styles['details']}>
-        <label className={styles['field']}>
-          <span>Till</span>
-          <select value={order.till} onChange={(event) => setOrder((now) => fromTill(now, site, asId<TillId>(event.target.value)))}>
-            {site.tills.map(({ id, name }) => <option key={id} value={id}>{name}</option>)}
-          </select>
-        </label>
-        <label className={styles['field']}>
-          <span>Area</span>
-          <select
-            value={order.area ?? ''}
-            onChange={(event) => setOrder(({ area: _, ...now }) => (event.target.value === '' ? now : { ...now, area: asId(event.target.value) }))}
-          >
-            <option value="">{areaName === '' ? 'The till’s own' : areaName}</option>
-            {site.areas.filter(({ id }) => id !== till?.area).map(({ id, name }) => <option key={id} value={id}>{name}</option>)}
-          </select>
-        </label>
-        <label className={styles['field']}>
-          <span>Order type</span>
-          <select value={order.orderType} onChange={(event) => setOrder((now) => ({ ...now, orderType: event.target.value as OrderType }))}>
-            {(till?.orderTypes ?? []).map((type) => <option key={type} value={type}>{firstLetterLarge(orderTypeWords[type])}</option>)}
-          </select>
-        </label>
-        <label className={styles['field']}>
-          <span>Table</span>
-          <input value={order.table} maxLength={40} onChange={(event) => setOrder((now) => ({ ...now, table: event.target.value }))} />
-        </label>
-        <label className={styles['field']}>
-          <span>Covers</span>
-          <input
-            inputMode="numeric"
-            value={order.covers ?? ''}
-            maxLength={3}
-            onChange={(event) => setOrder((now) => ({ ...now, covers: Number.parseInt(event.target.value, 10) || null }))}
-          />
-        </label>
-        <label className={styles['field']}>
-          <span>Server</span>
-          <input value={order.server} maxLength={60} onChange={(event) => setOrder((now) => ({ ...now, server: event.target.value }))} />
-        </label>
-      </div>
+      <label className={styles['field']}>
+        <span>Till</span>
+        <select value={order.till} onChange={(event) => setOrder((now) => fromTill(now, site, asId<TillId>(event.target.value)))}>
+          {site.tills.map(({ id, name }) => <option key={id} value={id}>{name}</option>)}
+        </select>
+      </label>
+      <label className={styles['field']}>
+        <span>Area</span>
+        <select
+          value={order.area ?? ''}
+          onChange={(event) => setOrder(({ area: _, ...now }) => (event.target.value === '' ? now : { ...now, area: asId(event.target.value) }))}
+        >
+          <option value="">{areaName}</option>
+          {site.areas.filter(({ id }) => id !== till?.area).map(({ id, name }) => <option key={id} value={id}>{name}</option>)}
+        </select>
+      </label>
+      <label className={styles['field']}>
+        <span>Order type</span>
+        <select value={order.orderType} onChange={(event) => setOrder((now) => ({ ...now, orderType: event.target.value as OrderType }))}>
+          {(till?.orderTypes ?? []).map((type) => <option key={type} value={type}>{firstLetterLarge(orderTypeWords[type])}</option>)}
+        </select>
+      </label>
     </>
+  );
+}
+
+function ForWhom({ order, setOrder }: Omit<OrderPart, 'site'>) {
+  return (
+    <>
+      <label className={styles['field']}>
+        <span>Table</span>
+        <input value={order.table} maxLength={40} onChange={(event) => setOrder((now) => ({ ...now, table: event.target.value }))} />
+      </label>
+      <label className={styles['field']}>
+        <span>Covers</span>
+        <input
+          inputMode="numeric"
+          value={order.covers ?? ''}
+          maxLength={3}
+          onChange={(event) => setOrder((now) => ({ ...now, covers: Number.parseInt(event.target.value, 10) || null }))}
+        />
+      </label>
+      <label className={styles['field']}>
+        <span>Server</span>
+        <input value={order.server} maxLength={60} autoComplete="off" onChange={(event) => setOrder((now) => ({ ...now, server: event.target.value }))} />
+      </label>
+      <label className={styles['field']}>
+        <span>Number</span>
+        <input value={order.number} maxLength={20} onChange={(event) => setOrder((now) => ({ ...now, number: event.target.value }))} />
+      </label>
+    </>
+  );
+}
+
+/** Under which plan and state of the kitchen, from which till, for whom: one strip above the order. */
+export function OrderDetails({ site, draft, change, setOrder }: DetailsProps) {
+  return (
+    <section className={styles['strip']} aria-label="Where the order comes from">
+      <Under site={site} draft={draft} change={change} />
+      <FromWhere site={site} order={draft.order} setOrder={setOrder} />
+      <ForWhom order={draft.order} setOrder={setOrder} />
+    </section>
   );
 }

@@ -8,6 +8,9 @@ import { counted, itemName, sentencesOf } from './words';
 
 type VerdictProps = { readonly site: Site; readonly order: Order; readonly tried: TriedOrder; readonly context: string; readonly onSelect: (line: number) => void };
 
+const refusedLines = (tried: TriedOrder): number =>
+  new Set([...tried.refusals.flatMap(({ line }) => line ?? []), ...tried.lines.filter(({ outcome }) => outcome === 'refused').map(({ line }) => line)]).size;
+
 /** The outcome of the whole order in one sentence. */
 export const headline = (tried: TriedOrder): { readonly tone: 'well' | 'look' | 'lost'; readonly words: string } => {
   const whole = tried.refusals.find(({ line }) => line === null);
@@ -18,8 +21,11 @@ export const headline = (tried: TriedOrder): { readonly tone: 'well' | 'look' | 
   if (part > 0) return { tone: 'lost', words: `${counted(part, 'line')} would print only in part` };
   if (tried.tickets.some(({ unprintable }) => unprintable.some(({ allergy }) => allergy))) return { tone: 'lost', words: 'An allergy would not print as it was said' };
   if (tried.losses.length > 0) return { tone: 'look', words: 'A copy would print nowhere' };
+  const refused = refusedLines(tried);
   const printers = new Set(tried.tickets.map(({ ticket }) => ticket.printer)).size;
-  return { tone: 'well', words: printers === 0 ? 'Nothing prints for this order' : `Everything prints: ${counted(tried.tickets.length, 'ticket')} from ${counted(printers, 'printer')}` };
+  const paper = `${counted(tried.tickets.length, 'ticket')} from ${counted(printers, 'printer')}`;
+  if (refused > 0) return { tone: 'look', words: `${counted(refused, 'line is', 'lines are')} refused${printers === 0 ? '' : `, the rest prints: ${paper}`}` };
+  return { tone: 'well', words: printers === 0 ? 'Nothing prints for this order' : `Everything prints: ${paper}` };
 };
 
 /** Each dish, printer and character once, allergies first. */
@@ -51,14 +57,14 @@ const brokenLines = (site: Site, order: Order, tried: TriedOrder): readonly Brok
 export function Verdict({ site, order, tried, context, onSelect }: VerdictProps) {
   const { tone, words } = headline(tried);
   const broken = brokenLines(site, order, tried);
-  const refusedLines = new Set([...tried.refusals.flatMap(({ line }) => line ?? []), ...tried.lines.filter(({ outcome }) => outcome === 'refused').map(({ line }) => line)]).size;
+  const refused = refusedLines(tried);
   return (
     <section id="tickets" className={styles['verdict']} aria-live="polite">
       <h2 className={styles[tone]}>
         <span className={styles['shape']} aria-hidden="true" />
         {words}
       </h2>
-      <p className={styles['context']}>{context}. Press a dish, here or on its ticket, to see why it prints there.{refusedLines > 0 ? ` ${counted(refusedLines, 'line is', 'lines are')} refused and sent nowhere.` : ''}</p>
+      <p className={styles['context']}>{context}. Press a dish, here or on its ticket, to see why it prints there.{refused > 0 ? ` ${counted(refused, 'refused line is', 'refused lines are')} sent nowhere.` : ''}</p>
       {tried.refusals.filter(({ line }) => line === null).map(({ message }) => <p key={message} className={styles['look']}>{message}</p>)}
       {broken.length === 0 ? null : (
         <ul className={styles['losses']}>
