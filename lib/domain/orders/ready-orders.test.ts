@@ -53,7 +53,7 @@ describe('the six ready orders', () => {
   });
 
   it('choose the dish whose option another station makes, and name both', () => {
-    expect(ready['split-dish']!.name).toBe('House burger with side salad');
+    expect(ready['split-dish']).toMatchObject({ name: 'House burger with side salad', says: 'One dish that two stations make.' });
     expect(ready['split-dish']!.order.lines[0]!.options).toEqual(['Rare', 'Side salad']);
   });
 

@@ -81,7 +81,7 @@ const covers = (rule: Rule, item: Item): boolean => {
 };
 
 /** A dish with an option that another station makes; failing that, a dish with any option; failing that, any dish. */
-const dishWithSplit = ({ site, plan, items }: Kitchen): { readonly item: Item; readonly option: OptionId | null } | null => {
+const dishWithSplit = ({ site, plan, items }: Kitchen): { readonly item: Item; readonly option: OptionId | null; readonly says: string } | null => {
   const dishes = items.filter((item) => !item.noTicket);
   const choices = dishes.flatMap((item) => item.optionGroups
     .flatMap((id) => site.menu.optionGroups.find((group) => group.id === id)?.options ?? [])
@@ -89,17 +89,21 @@ const dishWithSplit = ({ site, plan, items }: Kitchen): { readonly item: Item; r
   const splits = plan.rules.filter(({ kind }) => kind === 'split');
   const split = choices.find(({ item, option }) => splits.some((rule) => 'option' in rule.target && rule.target.option === option && covers(rule, item)));
   const [dish] = dishes;
-  return split ?? choices[0] ?? (dish === undefined ? null : { item: dish, option: null });
+  const [choice] = choices;
+  if (split !== undefined) return { ...split, says: 'One dish that two stations make.' };
+  if (choice !== undefined) return { ...choice, says: 'One dish with a choice on it.' };
+  return dish === undefined ? null : { item: dish, option: null, says: 'One dish alone.' };
 };
 
-const splitDish = (kitchen: Kitchen): { readonly name: string; readonly order: Order } => {
+const splitDish = (kitchen: Kitchen): Pick<ReadyOrder, 'name' | 'says' | 'order'> => {
   const { site, till } = kitchen;
   const found = dishWithSplit(kitchen);
-  if (found === null) return { name: 'One dish', order: orderOf(till, []) };
+  if (found === null) return { name: 'One dish', says: '', order: orderOf(till, []) };
   const option = site.menu.options.find(({ id }) => id === found.option);
   const options = neededOptions(found.item, site, option === undefined ? [] : [option.id]);
   return {
     name: option === undefined ? found.item.name : `${found.item.name} with ${option.name.toLowerCase()}`,
+    says: found.says,
     order: orderOf(till, [newLine(found.item, site, { seat: 1, options })], { table: '6', covers: 1 }),
   };
 };
@@ -148,7 +152,7 @@ export const readyOrders = (site: Site, plan: Plan): readonly ReadyOrder[] => {
   return [
     { key: 'table-of-four', name: `A table of four, ${['', 'one course', 'two courses', 'three courses'][courses]} and an allergy`, says: 'Every course at once, and seat 2 may not have tree nuts.', order: tableOfFour(kitchen) },
     { key: 'drinks', name: 'Drinks at the bar', says: 'No food: does the kitchen stay quiet?', order: drinks(kitchen) },
-    { key: 'split-dish', name: dish.name, says: 'One dish that may come from two stations.', order: dish.order },
+    { key: 'split-dish', ...dish },
     { key: 'take-away', name: 'Take-away for two', says: 'Leaves without a table.', order: takeAway(kitchen) },
     { key: 'every-section', name: 'One of every menu section', says: 'Shows at a glance what prints nowhere.', order: everySection(kitchen) },
     { key: 'late-table', name: 'Late table', says: 'The last course from another part of the room, with a note to look at.', order: lateTable(kitchen) },

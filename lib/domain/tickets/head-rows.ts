@@ -25,7 +25,7 @@ const placeWords = (ticket: Ticket, paper: Paper): string => {
 const senderRows = (ticket: Ticket, paper: Paper): readonly Row[] => {
   const sender = [ticket.till, ticket.server].map((words) => paper.words(words, 'as typed')).filter((words) => words !== '').join('  ');
   const number = ticket.orderNumber === '' ? '' : paper.words(`No ${numberWords(ticket)}`, 'as typed');
-  const counted = ticket.covers === null ? sender : `${sender}  ${ticket.covers} covers`;
+  const counted = ticket.covers === null ? sender : `${sender}  ${ticket.covers} ${ticket.covers === 1 ? 'cover' : 'covers'}`;
   return spreadRows(cellsOf(counted) + 1 + cellsOf(number) <= paper.columns ? counted : sender, number, paper);
 };
 
