@@ -1,5 +1,4 @@
 import { z } from 'zod';
-import type { Fix } from '@/lib/domain/findings/finding';
 import { portKinds } from '@/lib/domain/site/till';
 
 const id = z.string().max(36);
@@ -33,8 +32,4 @@ export const fixInput = z.discriminatedUnion('kind', [
   z.object({ kind: z.literal('set-stand-in'), station: id, standIn: id, label }),
 ]);
 
-export type RowFix = Exclude<Fix, { readonly kind: 'send-sections' | 'remove-rule' | 'print-test' }>;
 export const fixBody = z.object({ fix: fixInput });
-
-/** Whether a press changes a row here and now. */
-export const isRowFix = (fix: Fix): fix is RowFix => fix.kind !== 'send-sections' && fix.kind !== 'remove-rule' && fix.kind !== 'print-test';

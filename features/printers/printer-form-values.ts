@@ -1,6 +1,5 @@
 import type { Fix } from '@/lib/domain/findings/finding';
 import type { Printer } from '@/lib/domain/site/printer';
-import type { Site } from '@/lib/domain/site/site';
 import { siteMaskOf } from '@/lib/domain/addresses/device-findings';
 import { nextFreeAddress } from '@/lib/domain/addresses/next-free-address';
 import type { DraftSite } from '@/lib/domain/checks/check-draft';
@@ -29,11 +28,4 @@ export const fieldsOfFix = (fix: Fix): Partial<PrinterInput> | null => {
     case 'set-printer-mac': return { mac: fix.mac };
     default: return null;
   }
-};
-
-/** "10.20.30.201", "USB on Terrace", or what is missing. */
-export const whereIs = (printer: Pick<Printer, 'connection' | 'address' | 'hostTill'>, tills: Site['tills']): string => {
-  if (printer.connection === 'network') return printer.address === '' ? 'No address yet' : printer.address;
-  const host = tills.find((till) => till.id === printer.hostTill)?.name ?? 'no till yet';
-  return `${{ usb: 'USB', serial: 'Serial', parallel: 'Parallel' }[printer.connection]} on ${host}`;
 };

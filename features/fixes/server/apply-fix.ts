@@ -2,7 +2,7 @@ import 'server-only';
 import type { Transaction } from 'sequelize';
 import { fixPermissions } from '@/lib/domain/findings/fix-permissions';
 import { actIn, type Actor } from '@/lib/server/actor';
-import type { RowFix } from '../schema';
+import type { RowFix } from '../row-fix';
 import { changeNetwork, changeStandIn, reserveAddress } from './change-site';
 import { changePrinter, changeTill } from './change-device';
 

@@ -32,6 +32,10 @@ const sayValue = (printer: Printer, field: PrinterField, naming: PrinterNaming):
   }
 };
 
+/** Every field of a printer in words, for somebody who only reads. */
+export const printerFacts = (printer: Printer, naming: PrinterNaming): readonly { readonly label: string; readonly value: string }[] =>
+  (Object.keys(printerFieldWords) as PrinterField[]).map((field) => ({ label: printerFieldWords[field], value: sayValue(printer, field, naming) }));
+
 const sameValue = (left: unknown, right: unknown): boolean =>
   Array.isArray(left) && Array.isArray(right) ? left.toSorted().join('\n') === right.toSorted().join('\n') : left === right;
 

@@ -33,6 +33,10 @@ const sayValue = (till: Till, field: TillField, naming: TillNaming): string => {
   }
 };
 
+/** Every field of a till in words, for somebody who only reads. */
+export const tillFacts = (till: Till, naming: TillNaming): readonly { readonly label: string; readonly value: string }[] =>
+  (Object.keys(tillFieldWords) as TillField[]).map((field) => ({ label: tillFieldWords[field], value: sayValue(till, field, naming) }));
+
 /** Rows and lists count as equal in any order: nobody sorts the printers of a till on purpose. */
 const comparable = (till: Till, field: TillField): string => {
   const value = till[field];
