@@ -8,7 +8,8 @@ import type { Site } from '@/lib/domain/site/site';
 import { Printed } from './printed';
 import { ReadyOrderList } from './ready-order-list';
 import styles from './try-order.module.css';
-import { headline, Verdict } from './verdict';
+import { Verdict } from './verdict';
+import { headline } from './verdict-words';
 import { WhyLine } from './why-line';
 import { contextWords } from './words';
 
