@@ -42,9 +42,12 @@ export async function runQuietly(what, command, parts, log, options = {}) {
   if (code !== 0) throw new Sentence(`${what} failed (${code}), so Tamis stopped here. Its last words, all of them in ${log}:\n${lastLines(log)}`);
 }
 
+/** The end of a log, led by the first line that names an error when the end does not hold it. */
 export function lastLines(file, count = 15) {
   const lines = readFileSync(file, 'utf8').trimEnd().split('\n');
-  return lines.slice(-count).map((line) => `    ${line}`).join('\n');
+  const end = lines.slice(-count);
+  const cause = lines.slice(0, -count).find((line) => /\b\w*error\b.*:|\bERR!/i.test(line));
+  return [...(cause === undefined ? [] : [cause, '...']), ...end].map((line) => `    ${line}`).join('\n');
 }
 
 export const inPackages = (...parts) => path.join(root, 'node_modules', ...parts);

@@ -16,7 +16,7 @@ export function told(name: 'TAMIS_BASE_URL' | 'TAMIS_DEMO_PASSWORD' | 'DATABASE_
   return value;
 }
 
-/** The demo's people on its larger site, the only one with all four roles. */
+/** The demo's people on the site that the tests visit. */
 export const demoPeople = (): readonly DemoPerson[] => JSON.parse(readFileSync(keptPeople, 'utf8')) as readonly DemoPerson[];
 
 export function personWith(role: Role): DemoPerson {
