@@ -1,12 +1,12 @@
-import { accessSync, chmodSync, constants, mkdirSync, statfsSync } from 'node:fs';
+import { accessSync, chmodSync, constants, existsSync, mkdirSync, statfsSync } from 'node:fs';
 import path from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { Sentence } from './sentence.mjs';
 
 export const root = path.resolve(fileURLToPath(new URL('../..', import.meta.url)));
 
-/** What a start needs on disk beyond what is there: the packages and the build at first, later only room to work. */
-const neededBytes = { first: 1_500_000_000, later: 200_000_000 };
+/** What a start needs on disk beyond what is there: packages, build and database at first, later only room to work. */
+const neededBytes = { first: 1_200_000_000, later: 200_000_000 };
 
 /** Every path below one data folder; nothing of ours lies outside it but node_modules and the build. */
 export function homeAt(folder) {
@@ -27,16 +27,14 @@ export function homeAt(folder) {
 
 /** Makes the folders, readable by nobody else, and says at once when they cannot be used. */
 export function openHome(home) {
-  const isFirst = makeFolder(home.folder);
-  for (const folder of [home.mail, path.dirname(home.log('any'))]) makeFolder(folder);
+  const isFirst = !existsSync(path.join(root, 'node_modules'));
+  mustHaveRoom(root, isFirst ? neededBytes.first : neededBytes.later);
+  for (const folder of [home.folder, home.mail, path.dirname(home.log('any'))]) makeFolder(folder);
   accessSync(home.folder, constants.R_OK | constants.W_OK | constants.X_OK);
-  mustHaveRoom(home.folder, isFirst ? neededBytes.first : neededBytes.later);
 }
 
 function makeFolder(folder) {
-  const made = mkdirSync(folder, { recursive: true, mode: 0o700 });
-  if (made) chmodSync(folder, 0o700);
-  return made !== undefined;
+  if (mkdirSync(folder, { recursive: true, mode: 0o700 })) chmodSync(folder, 0o700);
 }
 
 export function mustHaveRoom(folder, bytes, look = statfsSync) {

@@ -48,7 +48,7 @@ export async function mustBeFree(port, host) {
   if (code === undefined) return;
   const other = port < 65_535 ? port + 1 : 3000;
   if (code === 'EACCES')
-    throw new Sentence(`Only the system's owner may listen on port ${port}; start Tamis on another with "PORT=3000 npm start". Nothing was changed.`);
+    throw new Sentence(`Only root may listen on port ${port}; start Tamis on another with "PORT=3000 npm start". Nothing was changed.`);
   if (code === 'EADDRINUSE')
     throw new Sentence(`Port ${port} is in use by another program, so Tamis did not start; stop that program or use another port with "PORT=${other} npm start". Nothing was changed.`);
   throw new Sentence(`Tamis cannot listen on ${host} port ${port} (${code}); give an address of this machine in HOST. Nothing was changed.`);
