@@ -1,7 +1,7 @@
 'use client';
 
 import Link from 'next/link';
-import { FindingCard } from '@/components/finding-card';
+import { FindingCard, findingActionClass } from '@/components/finding-card';
 import type { ProofFinding, WayToOrder } from '@/lib/domain/proof/summary';
 import { useBoard, useSettings, useStore } from './board-context';
 import { useFix } from './fixing';
@@ -19,15 +19,16 @@ function BoardFinding({ finding }: { readonly finding: ProofFinding }) {
   const { siteId, planId } = useSettings();
   const fix = useFix();
   const show = (): void => store.set((state) => ({ ...state, shown: cardsShowing(state, finding, store.site) }));
-  const linkStyle = 'min-h-6 text-[12.5px] font-semibold underline underline-offset-3';
   return (
     <FindingCard severity={finding.severity} title={finding.title} message={finding.message}>
       {finding.example === null ? null : (
-        <Link className={linkStyle} href={tryHref(siteId, planId, finding.example)} onMouseEnter={show} onFocus={show}>Show the way it goes</Link>
+        <Link className={findingActionClass} href={tryHref(siteId, planId, finding.example)} onMouseEnter={show} onFocus={show}>Show the way it goes</Link>
       )}
-      {finding.fixes.filter(fix.canFix).map((mend) => (
-        <button key={mend.label} type="button" className={linkStyle} onClick={() => fix.apply(mend)}>{mend.label}</button>
-      ))}
+      {finding.fixes.filter(fix.canFix).map((mend) => (mend.kind === 'print-test' ? (
+        <Link key={mend.label} className={findingActionClass} href={`/sites/${siteId}/printers?printer=${mend.printer}`}>{mend.label}</Link>
+      ) : (
+        <button key={mend.label} type="button" className={findingActionClass} onClick={() => fix.apply(mend)}>{mend.label}</button>
+      )))}
     </FindingCard>
   );
 }

@@ -1,6 +1,6 @@
 'use client';
 
-import { Button } from '@/components/button';
+import { Button, buttonClass } from '@/components/button';
 import { countWords } from '@/lib/domain/plans/words';
 import { redo, undo } from '../store/make-edit';
 import { useBoard, useSettings, useStore } from './board-context';
@@ -43,8 +43,6 @@ export function ToFixLink() {
   const toFix = useBoard((state) => state.proof?.findings.filter((finding) => finding.severity === 'stop').length ?? 0);
   if (toFix === 0) return null;
   return (
-    <a href="#findings" className="rounded-[7px] border-[1.5px] border-hot bg-raised px-[15px] py-[9px] text-[13.5px] leading-tight font-semibold text-hot-text">
-      {toFix} to fix before it can go live
-    </a>
+    <a href="#findings" className={buttonClass('wait')}>{toFix} to fix before it can go live</a>
   );
 }

@@ -1,4 +1,4 @@
-import Link from 'next/link';
+import { ButtonLink } from '@/components/button';
 import type { BoardView } from '../board-view';
 import { BoardAside } from './board-aside';
 import { NotLive, ToFixLink, UndoButtons } from './board-head';
@@ -19,7 +19,7 @@ export function BoardScreen({ view }: { readonly view: BoardView }) {
   return (
     <BoardRoom key={plan.id} site={view.site} content={view.content} version={plan.version} proof={view.proof} settings={settings}>
       <div className="flex min-h-14 flex-wrap items-center gap-x-3.5 gap-y-2.5 px-4 pt-3.5 md:px-[22px]">
-        <h1 className="text-[23px] leading-[1.05] font-[680] tracking-[-0.015em] font-stretch-[112%]">Board</h1>
+        <h1>Board</h1>
         <PlanTabs siteId={siteId} plans={plans} shown={plan.id} />
         {mayWrite ? <PlansButton /> : null}
         <NotLive livePlanName={view.livePlanName} />
@@ -27,7 +27,7 @@ export function BoardScreen({ view }: { readonly view: BoardView }) {
         <span className="flex-1" />
         {mayWrite ? null : <p className="text-[13px] text-soft">You may look at this board, not change it.</p>}
         <UndoButtons />
-        <Link href={`/sites/${siteId}/try?plan=${plan.id}`} className="rounded-[7px] border border-line-strong bg-raised px-[15px] py-[9px] text-[13.5px] leading-tight font-semibold">Try an order</Link>
+        <ButtonLink href={`/sites/${siteId}/try?plan=${plan.id}`}>Try an order</ButtonLink>
         <ToFixLink />
       </div>
       <div className="grid min-[1180px]:grid-cols-[minmax(0,1fr)_336px]">

@@ -8,6 +8,7 @@ import { allCards } from '../store/lift';
 import { makeStep } from '../store/make-edit';
 import { sayStationChange, stationEdits } from '../store/station-edits';
 import { newRuleId, useBoard, useSettings, useStore } from './board-context';
+import { PanelNotice } from './panel-notice';
 import { CopiesPart } from './panel/copies-part';
 import { ItemsPart } from './panel/items-part';
 import { OfferPart } from './panel/offer-part';
@@ -55,6 +56,7 @@ export function CardPanel({ cardId, close }: { readonly cardId: string; readonly
   return (
     <SidePanel title={card.name} close={close}>
       <div className="grid gap-5">
+        <PanelNotice />
         <p className="text-[13px] text-soft">
           {card.under}
           {card.tags.length === 0 ? null : `, only ${card.tags.join(', ')}`}

@@ -3,6 +3,7 @@
 import { SidePanel } from '@/components/side-panel';
 import { sayRule } from '@/lib/domain/plans/say-rule';
 import type { Rule } from '@/lib/domain/site/plan';
+import { PanelNotice } from './panel-notice';
 import { useBoard, useSettings, useStore } from './board-context';
 import { useMakeEdit } from './use-make-edit';
 
@@ -41,6 +42,7 @@ export function RulesPanel({ close }: { readonly close: () => void }) {
   const { planName } = useSettings();
   return (
     <SidePanel title={`Rules of ${planName}`} close={close}>
+      <PanelNotice />
       <p className="text-[13px] text-soft">The narrowest rule wins: an item over its section, a till over an area, an area over an order type. Of two equals the lower one wins.</p>
       {kinds.map(({ kind, title }) => {
         const ofKind = rules.filter((rule) => rule.kind === kind);

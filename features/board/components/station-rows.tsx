@@ -36,14 +36,14 @@ export function StationRows({ legend, stations, ticked, change, only }: StationR
                 </button>
               )}
               <label className={`flex min-h-9 items-center gap-2.5 rounded-md px-2 hover:bg-ground ${only === undefined ? 'flex-1' : ''}`}>
+                {only === undefined ? name : null}
                 <input
                   type="checkbox"
-                  className="size-4.5 accent-ink"
+                  className="ml-auto size-4.5 accent-ink"
                   checked={isTicked}
                   aria-label={only === undefined ? station.name : `${station.name} as well`}
                   onChange={(event) => change(station.id, event.target.checked)}
                 />
-                {only === undefined ? name : null}
               </label>
             </li>
           );
