@@ -21,7 +21,7 @@ export function TakeOffList({ name, consequences, obstacles, takeOff, busy }: Ta
       <p className="font-semibold">{stays ? `${name} has to stay for now.` : `Take ${name} off the list?`}</p>
       {[...obstacles, ...(stays ? [] : consequences)].map((words) => <p key={words}>{words}</p>)}
       <div className="flex flex-wrap gap-2">
-        {stays ? null : <Button kind="danger" disabled={busy} onClick={takeOff}>Take it off</Button>}
+        {stays ? null : <Button kind="hot" disabled={busy} onClick={takeOff}>Take it off</Button>}
         <Button autoFocus onClick={() => setAsked(false)}>Keep it</Button>
       </div>
     </div>

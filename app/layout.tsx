@@ -1,0 +1,20 @@
+import type { Metadata, Viewport } from 'next';
+import { cookies } from 'next/headers';
+import type { ReactNode } from 'react';
+import './globals.css';
+
+export const metadata: Metadata = {
+  title: { template: '%s, Tamis', default: 'Tamis' },
+  description: 'Decides what prints where in a restaurant, and proves that nothing is lost.',
+};
+
+export const viewport: Viewport = { width: 'device-width', initialScale: 1, themeColor: '#20251f' };
+
+export default async function RootLayout({ children }: { readonly children: ReactNode }) {
+  const light = (await cookies()).get('light')?.value;
+  return (
+    <html lang="en" data-light={light === 'low' || light === 'light' ? light : undefined}>
+      <body>{children}</body>
+    </html>
+  );
+}
