@@ -3,12 +3,11 @@
 import Link from 'next/link';
 import { useRouter } from 'next/navigation';
 import { useState, useTransition } from 'react';
+import { findingActionClass } from '@/components/finding-card';
 import type { Fix } from '@/lib/domain/findings/finding';
 import { ProblemError } from '@/lib/http/client';
 import { applyFix } from '../api/apply-fix';
 import { isRowFix } from '../row-fix';
-
-const pressable = 'mr-4 min-h-8 text-left text-[12.5px] font-semibold underline underline-offset-3 disabled:text-quiet';
 
 type FixButtonsProps = { readonly siteId: string; readonly fixes: readonly Fix[] };
 
@@ -35,10 +34,10 @@ export function FixButtons({ siteId, fixes }: FixButtonsProps) {
   return (
     <>
       {fixes.map((fix) => (fix.kind === 'print-test'
-        ? <Link key={fix.label} className={pressable} href={`/sites/${siteId}/printers?printer=${encodeURIComponent(fix.printer)}#tests`}>{fix.label}</Link>
-        : <button key={fix.label} type="button" className={pressable} disabled={busy} onClick={() => press(fix)}>{fix.label}</button>
+        ? <Link key={fix.label} className={findingActionClass} href={`/sites/${siteId}/printers?printer=${encodeURIComponent(fix.printer)}#tests`}>{fix.label}</Link>
+        : <button key={fix.label} type="button" className={findingActionClass} disabled={busy} onClick={() => press(fix)}>{fix.label}</button>
       ))}
-      <p role="status" className="text-[12.5px] font-semibold text-hot-text empty:hidden">{refused}</p>
+      <p role="status" className="w-full text-[12.5px] font-semibold text-hot-text empty:hidden">{refused}</p>
     </>
   );
 }

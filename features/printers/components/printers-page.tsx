@@ -1,6 +1,10 @@
 import Link from 'next/link';
 import type { ReactNode } from 'react';
+import { ButtonLink } from '@/components/button';
 import { DeviceTable } from '@/components/device-table';
+import { EmptyState } from '@/components/empty-state';
+import { findingActionClass } from '@/components/finding-card';
+import { PageHead } from '@/components/page-head';
 import { Tag } from '@/components/tag';
 import { sayInstant } from '@/lib/domain/devices/say-instant';
 import { stageWords } from '@/lib/domain/devices/printer-words';
@@ -19,9 +23,6 @@ type PrintersPageProps = {
   readonly panel: ReactNode;
 };
 
-const openLink = 'inline-flex min-h-8 items-center font-semibold underline underline-offset-3';
-const addLink = 'inline-flex min-h-10 items-center rounded-[7px] bg-ink px-4 text-[13.5px] font-semibold text-on-ink';
-
 function Stage({ row, timeZone }: { readonly row: PrinterRow; readonly timeZone: string }) {
   const { printer } = row;
   if (printer.downSince !== null) return <Tag tone="hot">{`Down since ${sayInstant(printer.downSince, timeZone)}`}</Tag>;
@@ -34,17 +35,17 @@ export function PrintersPage({ site, overview, mayWrite, findings, panel }: Prin
   const href = (query: string): string => `/sites/${site.id}/printers?${query}`;
   const { rows } = overview;
   return (
-    <main className="grid gap-4 px-6 py-4 max-[720px]:px-4">
-      <header className="flex flex-wrap items-center gap-x-4 gap-y-2">
-        <h1 className="text-[23px] leading-tight font-[680] tracking-[-0.015em] [font-stretch:112%]">{overview.verdict}</h1>
-        <p className="text-[13px] text-soft">{overview.said}</p>
-        {mayWrite ? <Link className={`${addLink} ml-auto`} href={href('add=printer')} scroll={false}>Add a printer</Link> : null}
-      </header>
+    <>
+      <PageHead title={overview.verdict} sub={overview.said}>
+        {mayWrite ? <ButtonLink kind="primary" href={href('add=printer')} scroll={false}>Add a printer</ButtonLink> : null}
+      </PageHead>
+      <div className="grid gap-4 px-4 py-4 md:px-[22px]">
+      <h2 className="sr-only">Printers</h2>
       {overview.siteFindings.length === 0 ? null : <section aria-label="About the network" className="grid grid-cols-[repeat(auto-fill,minmax(min(100%,330px),1fr))] gap-2">{findings(overview.siteFindings)}</section>}
       {rows.length === 0 ? (
-        <p className="rounded-[9px] border-[1.5px] border-dashed border-line-strong p-6 text-soft">
-          Write down each ticket printer of the kitchen and the bar, with the name the tills know it by. Then hang stations on them.
-        </p>
+        <EmptyState title="No printers yet" words="Write down each ticket printer of the kitchen and the bar, with the name the tills know it by. Then stations can print on them.">
+          {mayWrite ? <ButtonLink href={href('add=printer')} scroll={false}>Write down the first one</ButtonLink> : null}
+        </EmptyState>
       ) : (
         <DeviceTable
           caption="Printers"
@@ -58,13 +59,14 @@ export function PrintersPage({ site, overview, mayWrite, findings, panel }: Prin
               `${row.printer.rollWidthMm} mm`,
               row.backup === null ? 'None' : <span key="backup" className="font-mono">{row.backup}</span>,
               <Stage key="stage" row={row} timeZone={site.timeZone} />,
-              <Link key="open" className={openLink} href={href(`printer=${row.printer.id}`)} scroll={false} aria-label={`${mayWrite ? 'Edit' : 'Open'} ${row.printer.name}`}>{mayWrite ? 'Edit' : 'Open'}</Link>,
+              <Link key="open" className={findingActionClass} href={href(`printer=${row.printer.id}`)} scroll={false} aria-label={`${mayWrite ? 'Edit' : 'Open'} ${row.printer.name}`}>{mayWrite ? 'Edit' : 'Open'}</Link>,
             ],
             findings: row.findings.length === 0 ? null : findings(row.findings),
           }))}
         />
       )}
+      </div>
       {panel}
-    </main>
+    </>
   );
 }

@@ -1,5 +1,5 @@
 import type { Finding, Fix } from '../findings/finding';
-import type { Network, Site } from '../site/site';
+import type { Site } from '../site/site';
 import { parseAddress } from './parse-address';
 import { readMask } from './masks';
 import { readAddress } from './read-address';
