@@ -12,7 +12,7 @@ export class AreaRow extends Model<InferAttributes<AreaRow>, InferCreationAttrib
 export const defineAreaRow = (sequelize: Sequelize): void => {
   AreaRow.init({
     id: { type: DataTypes.STRING(36), primaryKey: true, allowNull: false },
-    siteId: { type: DataTypes.STRING(36), allowNull: false },
+    siteId: { type: DataTypes.STRING(36), primaryKey: true, allowNull: false },
     name: { type: DataTypes.STRING(120), allowNull: false },
     position: { type: DataTypes.INTEGER, allowNull: false, defaultValue: 0 },
     version: { type: DataTypes.INTEGER, allowNull: false, defaultValue: 1 },

@@ -11,7 +11,7 @@ export class CourseRow extends Model<InferAttributes<CourseRow>, InferCreationAt
 export const defineCourseRow = (sequelize: Sequelize): void => {
   CourseRow.init({
     id: { type: DataTypes.STRING(36), primaryKey: true, allowNull: false },
-    siteId: { type: DataTypes.STRING(36), allowNull: false },
+    siteId: { type: DataTypes.STRING(36), primaryKey: true, allowNull: false },
     name: { type: DataTypes.STRING(60), allowNull: false },
     position: { type: DataTypes.INTEGER, allowNull: false },
   }, { sequelize, tableName: 'courses', underscored: true, timestamps: false });

@@ -20,7 +20,7 @@ export class DivertRow extends Model<InferAttributes<DivertRow>, InferCreationAt
 export const defineDivertRow = (sequelize: Sequelize): void => {
   DivertRow.init({
     id: { type: DataTypes.STRING(36), primaryKey: true, allowNull: false },
-    siteId: { type: DataTypes.STRING(36), allowNull: false },
+    siteId: { type: DataTypes.STRING(36), primaryKey: true, allowNull: false },
     kind: { type: DataTypes.STRING(24), allowNull: false },
     sectionId: { type: DataTypes.STRING(36), allowNull: true, defaultValue: null },
     itemId: { type: DataTypes.STRING(36), allowNull: true, defaultValue: null },

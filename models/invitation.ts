@@ -17,7 +17,7 @@ export class InvitationRow extends Model<InferAttributes<InvitationRow>, InferCr
 export const defineInvitationRow = (sequelize: Sequelize): void => {
   InvitationRow.init({
     id: { type: DataTypes.STRING(36), primaryKey: true, allowNull: false },
-    siteId: { type: DataTypes.STRING(36), allowNull: false },
+    siteId: { type: DataTypes.STRING(36), primaryKey: true, allowNull: false },
     email: { type: DataTypes.STRING(254), allowNull: false },
     role: { type: DataTypes.STRING(24), allowNull: false },
     title: { type: DataTypes.STRING(80), allowNull: false, defaultValue: '' },

@@ -21,7 +21,7 @@ export class ItemRow extends Model<InferAttributes<ItemRow>, InferCreationAttrib
 export const defineItemRow = (sequelize: Sequelize): void => {
   ItemRow.init({
     id: { type: DataTypes.STRING(36), primaryKey: true, allowNull: false },
-    siteId: { type: DataTypes.STRING(36), allowNull: false },
+    siteId: { type: DataTypes.STRING(36), primaryKey: true, allowNull: false },
     sectionId: { type: DataTypes.STRING(36), allowNull: false },
     name: { type: DataTypes.STRING(120), allowNull: false },
     kitchenName: { type: DataTypes.STRING(120), allowNull: false, defaultValue: '' },

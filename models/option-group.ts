@@ -14,7 +14,7 @@ export class OptionGroupRow extends Model<InferAttributes<OptionGroupRow>, Infer
 export const defineOptionGroupRow = (sequelize: Sequelize): void => {
   OptionGroupRow.init({
     id: { type: DataTypes.STRING(36), primaryKey: true, allowNull: false },
-    siteId: { type: DataTypes.STRING(36), allowNull: false },
+    siteId: { type: DataTypes.STRING(36), primaryKey: true, allowNull: false },
     name: { type: DataTypes.STRING(120), allowNull: false },
     min: { type: DataTypes.INTEGER, allowNull: false, field: 'min_count' },
     max: { type: DataTypes.INTEGER, allowNull: false, field: 'max_count' },

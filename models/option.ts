@@ -16,7 +16,7 @@ export class OptionRow extends Model<InferAttributes<OptionRow>, InferCreationAt
 export const defineOptionRow = (sequelize: Sequelize): void => {
   OptionRow.init({
     id: { type: DataTypes.STRING(36), primaryKey: true, allowNull: false },
-    siteId: { type: DataTypes.STRING(36), allowNull: false },
+    siteId: { type: DataTypes.STRING(36), primaryKey: true, allowNull: false },
     optionGroupId: { type: DataTypes.STRING(36), allowNull: false },
     name: { type: DataTypes.STRING(120), allowNull: false },
     kitchenName: { type: DataTypes.STRING(120), allowNull: false, defaultValue: '' },

@@ -13,7 +13,7 @@ export class PlanRow extends Model<InferAttributes<PlanRow>, InferCreationAttrib
 export const definePlanRow = (sequelize: Sequelize): void => {
   PlanRow.init({
     id: { type: DataTypes.STRING(36), primaryKey: true, allowNull: false },
-    siteId: { type: DataTypes.STRING(36), allowNull: false },
+    siteId: { type: DataTypes.STRING(36), primaryKey: true, allowNull: false },
     name: { type: DataTypes.STRING(60), allowNull: false },
     position: { type: DataTypes.INTEGER, allowNull: false },
     offersAll: { type: DataTypes.BOOLEAN, allowNull: false, defaultValue: true },

@@ -34,7 +34,7 @@ export class PrinterRow extends Model<InferAttributes<PrinterRow>, InferCreation
 export const definePrinterRow = (sequelize: Sequelize): void => {
   PrinterRow.init({
     id: { type: DataTypes.STRING(36), primaryKey: true, allowNull: false },
-    siteId: { type: DataTypes.STRING(36), allowNull: false },
+    siteId: { type: DataTypes.STRING(36), primaryKey: true, allowNull: false },
     name: { type: DataTypes.STRING(220), allowNull: false },
     model: { type: DataTypes.STRING(120), allowNull: false },
     serial: { type: DataTypes.STRING(120), allowNull: false },

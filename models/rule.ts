@@ -18,7 +18,7 @@ export class RuleRow extends Model<InferAttributes<RuleRow>, InferCreationAttrib
 export const defineRuleRow = (sequelize: Sequelize): void => {
   RuleRow.init({
     id: { type: DataTypes.STRING(36), primaryKey: true, allowNull: false },
-    siteId: { type: DataTypes.STRING(36), allowNull: false },
+    siteId: { type: DataTypes.STRING(36), primaryKey: true, allowNull: false },
     planId: { type: DataTypes.STRING(36), allowNull: false },
     kind: { type: DataTypes.STRING(24), allowNull: false },
     targetKind: { type: DataTypes.STRING(24), allowNull: false },

@@ -12,7 +12,7 @@ export class SectionRow extends Model<InferAttributes<SectionRow>, InferCreation
 export const defineSectionRow = (sequelize: Sequelize): void => {
   SectionRow.init({
     id: { type: DataTypes.STRING(36), primaryKey: true, allowNull: false },
-    siteId: { type: DataTypes.STRING(36), allowNull: false },
+    siteId: { type: DataTypes.STRING(36), primaryKey: true, allowNull: false },
     name: { type: DataTypes.STRING(120), allowNull: false },
     position: { type: DataTypes.INTEGER, allowNull: false },
     version: { type: DataTypes.INTEGER, allowNull: false, defaultValue: 1 },

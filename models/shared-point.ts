@@ -13,7 +13,7 @@ export class SharedPointRow extends Model<InferAttributes<SharedPointRow>, Infer
 export const defineSharedPointRow = (sequelize: Sequelize): void => {
   SharedPointRow.init({
     id: { type: DataTypes.STRING(36), primaryKey: true, allowNull: false },
-    siteId: { type: DataTypes.STRING(36), allowNull: false },
+    siteId: { type: DataTypes.STRING(36), primaryKey: true, allowNull: false },
     name: { type: DataTypes.STRING(120), allowNull: false },
     kind: { type: DataTypes.STRING(24), allowNull: false },
     position: { type: DataTypes.INTEGER, allowNull: false },

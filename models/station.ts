@@ -22,7 +22,7 @@ export class StationRow extends Model<InferAttributes<StationRow>, InferCreation
 export const defineStationRow = (sequelize: Sequelize): void => {
   StationRow.init({
     id: { type: DataTypes.STRING(36), primaryKey: true, allowNull: false },
-    siteId: { type: DataTypes.STRING(36), allowNull: false },
+    siteId: { type: DataTypes.STRING(36), primaryKey: true, allowNull: false },
     name: { type: DataTypes.STRING(60), allowNull: false },
     code: { type: DataTypes.STRING(2), allowNull: false },
     kind: { type: DataTypes.STRING(24), allowNull: false },

@@ -22,7 +22,7 @@ export class TillRow extends Model<InferAttributes<TillRow>, InferCreationAttrib
 export const defineTillRow = (sequelize: Sequelize): void => {
   TillRow.init({
     id: { type: DataTypes.STRING(36), primaryKey: true, allowNull: false },
-    siteId: { type: DataTypes.STRING(36), allowNull: false },
+    siteId: { type: DataTypes.STRING(36), primaryKey: true, allowNull: false },
     name: { type: DataTypes.STRING(120), allowNull: false },
     kind: { type: DataTypes.STRING(24), allowNull: false },
     areaId: { type: DataTypes.STRING(36), allowNull: false },

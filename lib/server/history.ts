@@ -27,9 +27,13 @@ export const recordChange = async (transaction: Transaction, change: ChangeRecor
   await SiteRow.increment('revision', { where: { id: change.siteId }, transaction });
 };
 
-/** Who changed a thing last, and when; null while nobody has. */
-export const lastChangeOf = async (siteId: string, subjectKind: string, subjectId: string, transaction?: Transaction): Promise<{ readonly by: string; readonly at: string; readonly summary: string } | null> => {
-  const row = await ChangeRow.findOne({ where: { siteId, subjectKind, subjectId }, order: [['id', 'DESC']], transaction: transaction ?? null });
+/** `at` is ISO 8601, UTC. */
+export type LastChange = { readonly by: string; readonly at: string; readonly summary: string };
+
+/** Who changed a thing last, and when; null while nobody has. Inside a transaction it sees what others have committed since. */
+export const lastChangeOf = async (siteId: string, subjectKind: string, subjectId: string, transaction?: Transaction): Promise<LastChange | null> => {
+  const within = { transaction: transaction ?? null, ...(transaction === undefined ? {} : { lock: transaction.LOCK.SHARE }) };
+  const row = await ChangeRow.findOne({ where: { siteId, subjectKind, subjectId }, order: [['id', 'DESC']], ...within });
   if (row === null) return null;
   const person = row.personId === null ? null : await PersonRow.findByPk(row.personId, { transaction: transaction ?? null });
   return { by: person?.name ?? 'Tamis', at: row.at.toISOString(), summary: row.summary };

@@ -4,6 +4,7 @@ import { asId } from '@/lib/domain/site/ids';
 import { orderTypes } from '@/lib/domain/site/order-types';
 import type { PrintLink, Site } from '@/lib/domain/site/site';
 import { SiteRow } from '@/models/site';
+import { inTransaction } from './database';
 import { loadMenu } from './snapshot/load-menu';
 import { loadPlans } from './snapshot/load-plans';
 import { loadPrinters, loadStations, loadTills } from './snapshot/load-devices';
@@ -14,10 +15,9 @@ const linkOf = (row: SiteRow): PrintLink => {
   return row.linkKind === 'own' ? { kind: 'own', address: row.linkAddress, mask: row.linkMask } : { kind: 'none' };
 };
 
-/** Reads a whole site as one value; null when there is none. Lists come sorted, so that equal rows give equal values. */
-export const loadSite = async (siteId: string, transaction?: Transaction): Promise<Site | null> => {
-  const within = { where: { siteId }, transaction: transaction ?? null };
-  const row = await SiteRow.findByPk(siteId, { transaction: transaction ?? null });
+const readSite = async (siteId: string, transaction: Transaction): Promise<Site | null> => {
+  const within = { where: { siteId }, transaction };
+  const row = await SiteRow.findByPk(siteId, { transaction });
   if (row === null) return null;
   const [surroundings, tills, printers, stations, menu, planned] = await Promise.all([
     loadSurroundings(within), loadTills(within, orderTypes), loadPrinters(within), loadStations(within), loadMenu(within), loadPlans(within),
@@ -37,3 +37,10 @@ export const loadSite = async (siteId: string, transaction?: Transaction): Promi
     },
   };
 };
+
+/**
+ * Reads a whole site as one value; null when there is none. Lists come sorted, so that equal rows give equal values. It is
+ * read in one transaction, given or its own, so that no change in between leaves a rule without its stations.
+ */
+export const loadSite = async (siteId: string, transaction?: Transaction): Promise<Site | null> =>
+  transaction === undefined ? inTransaction((own) => readSite(siteId, own)) : readSite(siteId, transaction);

@@ -1,12 +1,12 @@
 import 'server-only';
 import type { Transaction } from 'sequelize';
+import type { Plan, PlanContent } from '@/lib/domain/site/plan';
 import type { Site } from '@/lib/domain/site/site';
 import { AreaRow } from '@/models/area';
 import { ContactRow } from '@/models/contact';
 import { CourseRow } from '@/models/course';
 import { ItemRow } from '@/models/item';
 import { ItemOptionGroupRow } from '@/models/item-option-group';
-import { LiveTillRow } from '@/models/live-till';
 import { OptionRow } from '@/models/option';
 import { OptionGroupRow } from '@/models/option-group';
 import { PlanRow } from '@/models/plan';
@@ -82,18 +82,30 @@ const insertMenu = async (transaction: Transaction, { id: siteId, menu }: Site):
   await ItemOptionGroupRow.bulkCreate(menu.items.flatMap((item) => item.optionGroups.map((optionGroupId, position) => ({ siteId, itemId: item.id, position, optionGroupId }))), { transaction });
 };
 
-const insertPlans = async (transaction: Transaction, site: Site, now: Date): Promise<void> => {
+export type PlanVersionRecord = { readonly number: number; readonly content: PlanContent; readonly summary: string; readonly madeBy: string | null; readonly madeAt: Date };
+
+type HistoryOf = (plan: Plan) => readonly PlanVersionRecord[];
+
+const insertPlans = async (transaction: Transaction, site: Site, historyOf: HistoryOf): Promise<void> => {
   const siteId = site.id;
   for (const plan of site.plans) {
     await PlanRow.create({ id: plan.id, siteId, name: plan.name, position: plan.position, offersAll: plan.offers === null, version: plan.version }, { transaction });
     await replacePlanContent(transaction, siteId, plan.id, plan);
-    await PlanVersionRow.create({ siteId, planId: plan.id, number: plan.version, content: { offers: plan.offers, rules: plan.rules }, summary: 'As it came in', madeBy: null, madeAt: now }, { transaction });
+    await PlanVersionRow.bulkCreate(historyOf(plan).map((version) => ({ siteId, planId: plan.id, ...version })), { transaction });
     await WeeklyTimeRow.bulkCreate(plan.weeklyTimes.map(({ weekday, start }) => ({ siteId, planId: plan.id, weekday, start })), { transaction });
   }
 };
 
-/** Writes a whole site that is not there yet. Its ids must be free; its rows start at version 1, its plans at their own. */
-export const insertSite = async (transaction: Transaction, site: Site, now: Date): Promise<void> => {
+const asItCameIn = (now: Date): HistoryOf => ({ version, offers, rules }) =>
+  [{ number: version, content: { offers, rules }, summary: 'As it came in', madeBy: null, madeAt: now }];
+
+/**
+ * Writes a whole site that is not there yet. Its rows start at version 1, its plans at their own. What is live elsewhere is
+ * not live here: nothing is, until somebody puts a plan live.
+ *
+ * @param historyOf the versions of each plan, the newest last; without it each begins as it came in
+ */
+export const insertSite = async (transaction: Transaction, site: Site, now: Date, historyOf: HistoryOf = asItCameIn(now)): Promise<void> => {
   const { network, namingPolicy, link } = site;
   await SiteRow.create({
     id: site.id, name: site.name, place: site.place, timeZone: site.timeZone, language: site.language,
@@ -106,13 +118,6 @@ export const insertSite = async (transaction: Transaction, site: Site, now: Date
   await insertDevices(transaction, site);
   await insertStations(transaction, site);
   await insertMenu(transaction, site);
-  await insertPlans(transaction, site, now);
-  const { live } = site;
-  await SiteRow.update({
-    linkTillId: link.kind === 'till' ? link.till : null,
-    ...(live === null ? {} : { livePlanId: live.planId, liveVersion: live.version, liveSince: new Date(live.since) }),
-  }, { where: { id: site.id }, transaction });
-  if (live !== null) {
-    await LiveTillRow.bulkCreate(live.inForceOn.map((tillId) => ({ siteId: site.id, tillId, planId: live.planId, version: live.version, since: new Date(live.since), saidBy: null })), { transaction });
-  }
+  await insertPlans(transaction, site, historyOf);
+  if (link.kind === 'till') await SiteRow.update({ linkTillId: link.till }, { where: { id: site.id }, transaction });
 };

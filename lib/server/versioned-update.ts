@@ -1,5 +1,6 @@
 import 'server-only';
 import type { Model, ModelStatic, Transaction } from 'sequelize';
+import { lastChangeOf, type LastChange } from './history';
 
 /** Someone else wrote the row since it was read: what it holds now goes back with the refusal. */
 export class StaleWrite extends Error {
@@ -10,6 +11,8 @@ export class StaleWrite extends Error {
     /** The row as it is now. */
     readonly current: Readonly<Record<string, unknown>>,
     readonly version: number,
+    /** Who changed it last, when, and in which words; null while nobody has. */
+    readonly lastChange: LastChange | null,
   ) {
     super(`${subjectKind} ${subjectId} was changed by somebody else; it is at version ${version}.`);
   }
@@ -26,26 +29,40 @@ type Versioned = Model & { readonly version: number };
 
 export type RowKey = { readonly siteId: string; readonly id: string; readonly version: number };
 
+/** "OptionGroupRow" is an "option-group" in history. */
+const kindOf = (model: ModelStatic<Versioned>): string => model.name.replace(/Row$/, '').replace(/([a-z])([A-Z])/g, '$1-$2').toLowerCase();
+
+/** A site's own row has no site beside it. */
+const rowAt = (model: ModelStatic<Versioned>, { siteId, id }: Pick<RowKey, 'siteId' | 'id'>): object => ('siteId' in model.getAttributes() ? { siteId, id } : { id });
+
+/** The row as it stands now, locked: a plain read would repeat what this transaction saw at its start. */
+const lockedRow = async <Row extends Versioned>(model: ModelStatic<Row>, key: RowKey, transaction: Transaction): Promise<Row> => {
+  const row = await model.findOne({ where: rowAt(model, key) as never, transaction, lock: transaction.LOCK.UPDATE });
+  if (row === null) throw new RowMissing(kindOf(model), key.id);
+  return row;
+};
+
+const refusal = async (model: ModelStatic<Versioned>, { siteId, id }: RowKey, current: Versioned, transaction: Transaction): Promise<StaleWrite> => {
+  const kind = kindOf(model);
+  return new StaleWrite(kind, id, current.get({ plain: true }) as Record<string, unknown>, current.version, await lastChangeOf(siteId, kind, id, transaction));
+};
+
 /**
  * Writes a row if it still has the version it was read at, and raises the version by one. The check and the write are one
  * statement, so that of two people exactly one is refused.
  */
 export const updateVersioned = async <Row extends Versioned>(model: ModelStatic<Row>, key: RowKey, values: object, transaction: Transaction): Promise<Row> => {
-  const kind = model.name.replace(/Row$/, '').replace(/([a-z])([A-Z])/g, '$1 $2').toLowerCase();
-  const where = { siteId: key.siteId, id: key.id, version: key.version } as never;
+  const where = { ...rowAt(model, key), version: key.version } as never;
   const [count] = await model.update({ ...values, version: key.version + 1 } as never, { where, transaction });
-  const current = await model.findOne({ where: { siteId: key.siteId, id: key.id } as never, transaction });
-  if (current === null) throw new RowMissing(kind, key.id);
-  if (count === 0) throw new StaleWrite(kind, key.id, current.get({ plain: true }) as Record<string, unknown>, current.version);
+  const current = await lockedRow(model, key, transaction);
+  if (count === 0) throw await refusal(model, key, current, transaction);
   return current;
 };
 
 /** Deletes a row if it still has the version it was read at. */
 export const deleteVersioned = async <Row extends Versioned>(model: ModelStatic<Row>, key: RowKey, transaction: Transaction): Promise<Row> => {
-  const kind = model.name.replace(/Row$/, '').replace(/([a-z])([A-Z])/g, '$1 $2').toLowerCase();
-  const current = await model.findOne({ where: { siteId: key.siteId, id: key.id } as never, transaction, lock: transaction.LOCK.UPDATE });
-  if (current === null) throw new RowMissing(kind, key.id);
-  if (current.version !== key.version) throw new StaleWrite(kind, key.id, current.get({ plain: true }) as Record<string, unknown>, current.version);
+  const current = await lockedRow(model, key, transaction);
+  if (current.version !== key.version) throw await refusal(model, key, current, transaction);
   await current.destroy({ transaction });
   return current;
 };

@@ -1,61 +1,46 @@
-import { asId, type SectionId, type StationId } from '@/lib/domain/site/ids';
-import { anyCondition, type Plan, type PlanContent, type Rule, type WeeklyTime } from '@/lib/domain/site/plan';
+import { asId } from '@/lib/domain/site/ids';
+import { anyCondition, type WeeklyTime } from '@/lib/domain/site/plan';
+import type { DemoPlan } from '../demo-site';
+import { copyEverything, offer, send, sendItem, splitOption, versionsOf } from '../plan-history';
+import { menu } from './menu';
+import { stations } from './stations';
+import { areas } from './surroundings';
+import { tillsTestedAt } from './tills';
 
-const section = (key: string): SectionId => asId(`ly-s-${key}`);
-const station = (key: string): StationId => asId(`ly-st-${key}`);
+const site = { menu, stations, areas, tills: tillsTestedAt('2026-01-01T00:00:00.000Z') };
+const drinks = ['Cocktails', 'Wine and beer', 'Hot drinks'];
+const everyDay = (start: string): readonly WeeklyTime[] => [1, 2, 3, 4, 5, 6, 7].map((weekday) => ({ weekday, start }));
+const sideSalad = splitOption('burger-side-side-salad', 'Larder');
 
-const allSections = ['from-the-grill', 'burgers', 'sunday-roast', 'salads', 'cold-starters', 'pasta', 'fish', 'sides', 'desserts', 'cocktails', 'wine-and-beer', 'hot-drinks', 'late-menu', 'oysters'];
-
-const send = (plan: string, what: string, to: string): Rule => ({
-  id: asId(`ly-r-${plan}-${what}`), kind: 'send', target: { kind: 'section', section: section(what) }, conditions: anyCondition, stations: [station(to)], keep: false,
-});
-
-const usual: readonly (readonly [string, string])[] = [
-  ['from-the-grill', 'grill'], ['burgers', 'grill'], ['sunday-roast', 'grill'], ['salads', 'larder'], ['cold-starters', 'larder'], ['pasta', 'sauce'], ['fish', 'sauce'], ['sides', 'sauce'],
-  ['desserts', 'pastry'], ['cocktails', 'bar'], ['wine-and-beer', 'bar'], ['hot-drinks', 'bar'],
+const usual = [
+  send(['From the grill', 'Burgers'], 'Grill'), send(['Salads', 'Cold starters'], 'Larder'), send(['Pasta', 'Fish', 'Sides'], 'Sauce'),
+  send(['Desserts'], 'Pastry'), send(drinks, 'Bar'), copyEverything('Pass'),
 ];
 
-const rulesOf = (plan: string, sends: readonly (readonly [string, string])[]): readonly Rule[] => [
-  ...sends.map(([what, to]) => send(plan, what, to)),
-  ...(sends.some(([what]) => what === 'burgers') ? [{
-    id: asId<never>(`ly-r-${plan}-side-salad`), kind: 'split' as const, target: { kind: 'option' as const, option: asId<never>('ly-o-side-side-salad') }, conditions: anyCondition,
-    stations: [station('larder')], keep: false,
-  }] : []),
-  { id: asId(`ly-r-${plan}-pass`), kind: 'copy', target: { kind: 'everything' }, conditions: anyCondition, stations: [station('pass')], keep: false },
+/**
+ * What Dinner is live at. Its last three edits came later and are not live yet: the side salad splits, and Late menu and
+ * Oysters are offered, though no rule sends them anywhere. That is the mistake to find.
+ */
+export const dinnerLiveVersion = 8;
+
+const dinnerOffers = ['From the grill', 'Burgers', 'Sunday roast', 'Salads', 'Cold starters', 'Pasta', 'Fish', 'Sides', 'Desserts', ...drinks];
+const dinnerEdits = [...usual, send(['Sunday roast'], 'Grill'), sideSalad, offer(site, 'Late menu'), offer(site, 'Oysters')];
+
+const lunchOffers = [...dinnerOffers.filter((section) => section !== 'Sunday roast'), 'Oysters'];
+const lunchEdits = [
+  ...usual, send(['Oysters'], 'Larder'), sideSalad, sendItem('Cheese board', 'Larder'),
+  send(['Desserts'], 'Larder', { ...anyCondition, orderTypes: ['take-away', 'delivery'] }),
+  send(['Fish'], 'Grill', { ...anyCondition, areas: [asId('terrace')] }),
 ];
 
-const daily = (start: string): readonly WeeklyTime[] => [1, 2, 3, 4, 5, 6, 7].map((weekday) => ({ weekday, start }));
-const without = (...left: readonly string[]): readonly SectionId[] => allSections.filter((key) => !left.includes(key)).map(section);
-const only = (...kept: readonly string[]): readonly SectionId[] => kept.map(section);
+const breakfastEdits = [send(['Sides'], 'Sauce'), send(['Late menu'], 'Grill'), send(['Hot drinks'], 'Bar'), sendItem('Sourdough and butter', 'Larder'), copyEverything('Pass')];
 
-const breakfastSends = [['hot-drinks', 'bar'], ['salads', 'larder'], ['desserts', 'pastry'], ['sides', 'sauce']] as const;
-const quietSends = [['late-menu', 'larder'], ['oysters', 'larder'], ['salads', 'larder'], ['desserts', 'larder'], ['cocktails', 'bar'], ['wine-and-beer', 'bar'], ['hot-drinks', 'bar']] as const;
+const quietOffers = ['Burgers', 'Salads', 'Sides', 'Desserts', ...drinks, 'Late menu'];
+const quietEdits = [send(['Burgers', 'Sides', 'Late menu'], 'Grill'), send(['Salads', 'Desserts'], 'Larder'), send(drinks, 'Bar'), copyEverything('Pass'), sideSalad];
 
-/** The version of Dinner that the tills are set to. Everything in it prints. */
-export const liveVersion = 12;
-
-const atLive: PlanContent = {
-  offers: without('late-menu', 'oysters'),
-  rules: rulesOf('dinner', usual.map(([what, to]) => [what, what === 'sunday-roast' ? 'sauce' : to] as const)),
-};
-const roastMoved: PlanContent = { offers: atLive.offers, rules: rulesOf('dinner', usual) };
-const lateOffered: PlanContent = { offers: without('oysters'), rules: roastMoved.rules };
-const oystersOffered: PlanContent = { offers: null, rules: roastMoved.rules };
-
-/** Dinner as it was edited, up to what the board shows: two sections were offered and nobody has sent them anywhere. */
-export const dinnerHistory: readonly { readonly number: number; readonly content: PlanContent; readonly summary: string }[] = [
-  { number: liveVersion, content: atLive, summary: 'Sunday roast to Sauce' },
-  { number: liveVersion + 1, content: roastMoved, summary: 'Sunday roast to Grill' },
-  { number: liveVersion + 2, content: lateOffered, summary: 'Late menu is offered' },
-  { number: liveVersion + 3, content: oystersOffered, summary: 'Oysters is offered' },
-];
-
-const plan = (key: string, name: string, position: number, version: number, weeklyTimes: readonly WeeklyTime[], content: PlanContent): Plan =>
-  ({ id: asId(`ly-plan-${key}`), name, position, version, weeklyTimes, ...content });
-
-export const lanternYardPlans: readonly Plan[] = [
-  plan('breakfast', 'Breakfast', 0, 3, daily('07:00'), { offers: only('hot-drinks', 'salads', 'desserts', 'sides'), rules: rulesOf('breakfast', breakfastSends) }),
-  plan('lunch', 'Lunch', 1, 5, daily('11:30'), { offers: without('late-menu', 'oysters', 'sunday-roast'), rules: rulesOf('lunch', usual.filter(([what]) => what !== 'sunday-roast')) }),
-  plan('dinner', 'Dinner', 2, liveVersion + 3, daily('17:00'), oystersOffered),
-  plan('quiet', 'Quiet night', 3, 4, daily('22:00'), { offers: only('late-menu', 'oysters', 'salads', 'desserts', 'cocktails', 'wine-and-beer', 'hot-drinks'), rules: rulesOf('quiet', quietSends) }),
+export const plans: readonly DemoPlan[] = [
+  { name: 'Breakfast', weeklyTimes: everyDay('07:00'), versions: versionsOf(site, 'Breakfast', ['Sides', 'Late menu', 'Hot drinks'], breakfastEdits) },
+  { name: 'Lunch', weeklyTimes: everyDay('11:30'), versions: versionsOf(site, 'Lunch', lunchOffers, lunchEdits) },
+  { name: 'Dinner', weeklyTimes: everyDay('17:00'), versions: versionsOf(site, 'Dinner', dinnerOffers, dinnerEdits) },
+  { name: 'Quiet night', weeklyTimes: everyDay('22:00'), versions: versionsOf(site, 'Quiet night', quietOffers, quietEdits) },
 ];

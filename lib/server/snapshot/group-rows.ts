@@ -1,5 +1,7 @@
+import type { Transaction } from 'sequelize';
+
 /** What every loader needs: the site to read, and the transaction to read in. */
-export type Within = { readonly where: { readonly siteId: string }; readonly transaction: import('sequelize').Transaction | null };
+export type Within = { readonly where: { readonly siteId: string }; readonly transaction: Transaction };
 
 /** Rows by the key they hang on; a key without rows gives none. */
 export const groupRows = <Row>(rows: readonly Row[], keyOf: (row: Row) => string): ((key: string) => readonly Row[]) => {
