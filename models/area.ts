@@ -1,4 +1,5 @@
 import { DataTypes, Model, type CreationOptional, type InferAttributes, type InferCreationAttributes, type Sequelize } from 'sequelize';
+import { sharedConnection } from './shared-connection';
 
 /** A part of the room that orders come from. */
 export class AreaRow extends Model<InferAttributes<AreaRow>, InferCreationAttributes<AreaRow>> {
@@ -18,3 +19,5 @@ export const defineAreaRow = (sequelize: Sequelize): void => {
     version: { type: DataTypes.INTEGER, allowNull: false, defaultValue: 1 },
   }, { sequelize, tableName: 'areas', underscored: true, timestamps: false });
 };
+
+defineAreaRow(sharedConnection());

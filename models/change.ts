@@ -1,4 +1,5 @@
 import { DataTypes, Model, type CreationOptional, type InferAttributes, type InferCreationAttributes, type Sequelize } from 'sequelize';
+import { sharedConnection } from './shared-connection';
 
 /** Who changed what, when, in one sentence. */
 export class ChangeRow extends Model<InferAttributes<ChangeRow>, InferCreationAttributes<ChangeRow>> {
@@ -28,3 +29,5 @@ export const defineChangeRow = (sequelize: Sequelize): void => {
     afterValue: { type: DataTypes.JSON, allowNull: true, defaultValue: null },
   }, { sequelize, tableName: 'changes', underscored: true, timestamps: false });
 };
+
+defineChangeRow(sharedConnection());

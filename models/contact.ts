@@ -1,5 +1,6 @@
 import { DataTypes, Model, type InferAttributes, type InferCreationAttributes, type Sequelize } from 'sequelize';
 import type { ContactKind } from '@/lib/domain/site/site';
+import { sharedConnection } from './shared-connection';
 
 /** Whom to call about one site. */
 export class ContactRow extends Model<InferAttributes<ContactRow>, InferCreationAttributes<ContactRow>> {
@@ -21,3 +22,5 @@ export const defineContactRow = (sequelize: Sequelize): void => {
     email: { type: DataTypes.STRING(254), allowNull: false },
   }, { sequelize, tableName: 'contacts', underscored: true, timestamps: false });
 };
+
+defineContactRow(sharedConnection());

@@ -1,4 +1,5 @@
 import { DataTypes, Model, type InferAttributes, type InferCreationAttributes, type Sequelize } from 'sequelize';
+import { sharedConnection } from './shared-connection';
 
 /** A course that a site names. */
 export class CourseRow extends Model<InferAttributes<CourseRow>, InferCreationAttributes<CourseRow>> {
@@ -16,3 +17,5 @@ export const defineCourseRow = (sequelize: Sequelize): void => {
     position: { type: DataTypes.INTEGER, allowNull: false },
   }, { sequelize, tableName: 'courses', underscored: true, timestamps: false });
 };
+
+defineCourseRow(sharedConnection());

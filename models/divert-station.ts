@@ -1,4 +1,5 @@
 import { DataTypes, Model, type InferAttributes, type InferCreationAttributes, type Sequelize } from 'sequelize';
+import { sharedConnection } from './shared-connection';
 
 /** Where a divert leads. */
 export class DivertStationRow extends Model<InferAttributes<DivertStationRow>, InferCreationAttributes<DivertStationRow>> {
@@ -16,3 +17,5 @@ export const defineDivertStationRow = (sequelize: Sequelize): void => {
     stationId: { type: DataTypes.STRING(36), allowNull: false },
   }, { sequelize, tableName: 'divert_stations', underscored: true, timestamps: false });
 };
+
+defineDivertStationRow(sharedConnection());

@@ -1,5 +1,6 @@
 import { DataTypes, Model, type CreationOptional, type InferAttributes, type InferCreationAttributes, type Sequelize } from 'sequelize';
 import type { Divert } from '@/lib/domain/site/present';
+import { sharedConnection } from './shared-connection';
 
 /** A temporary change, with an end or until taken back. */
 export class DivertRow extends Model<InferAttributes<DivertRow>, InferCreationAttributes<DivertRow>> {
@@ -33,3 +34,5 @@ export const defineDivertRow = (sequelize: Sequelize): void => {
     takenBackAt: { type: DataTypes.DATE(3), allowNull: true, defaultValue: null },
   }, { sequelize, tableName: 'diverts', underscored: true, timestamps: false });
 };
+
+defineDivertRow(sharedConnection());

@@ -1,5 +1,6 @@
 import { DataTypes, Model, type CreationOptional, type InferAttributes, type InferCreationAttributes, type Sequelize } from 'sequelize';
 import type { Role } from '@/lib/domain/roles/permissions';
+import { sharedConnection } from './shared-connection';
 
 /** A one-time way in; only a digest of its word is kept. */
 export class InvitationRow extends Model<InferAttributes<InvitationRow>, InferCreationAttributes<InvitationRow>> {
@@ -27,3 +28,5 @@ export const defineInvitationRow = (sequelize: Sequelize): void => {
     usedAt: { type: DataTypes.DATE(3), allowNull: true, defaultValue: null },
   }, { sequelize, tableName: 'invitations', underscored: true, timestamps: false });
 };
+
+defineInvitationRow(sharedConnection());

@@ -1,4 +1,5 @@
 import { DataTypes, Model, type InferAttributes, type InferCreationAttributes, type Sequelize } from 'sequelize';
+import { sharedConnection } from './shared-connection';
 
 /** A group of options that an item comes with. */
 export class ItemOptionGroupRow extends Model<InferAttributes<ItemOptionGroupRow>, InferCreationAttributes<ItemOptionGroupRow>> {
@@ -16,3 +17,5 @@ export const defineItemOptionGroupRow = (sequelize: Sequelize): void => {
     optionGroupId: { type: DataTypes.STRING(36), allowNull: false },
   }, { sequelize, tableName: 'item_option_groups', underscored: true, timestamps: false });
 };
+
+defineItemOptionGroupRow(sharedConnection());

@@ -1,5 +1,6 @@
 import { DataTypes, Model, type CreationOptional, type InferAttributes, type InferCreationAttributes, type Sequelize } from 'sequelize';
 import type { Allergen } from '@/lib/domain/site/menu';
+import { sharedConnection } from './shared-connection';
 
 /** A dish or drink. */
 export class ItemRow extends Model<InferAttributes<ItemRow>, InferCreationAttributes<ItemRow>> {
@@ -35,3 +36,5 @@ export const defineItemRow = (sequelize: Sequelize): void => {
     version: { type: DataTypes.INTEGER, allowNull: false, defaultValue: 1 },
   }, { sequelize, tableName: 'items', underscored: true, timestamps: false });
 };
+
+defineItemRow(sharedConnection());

@@ -1,4 +1,5 @@
 import { DataTypes, Model, type CreationOptional, type InferAttributes, type InferCreationAttributes, type Sequelize } from 'sequelize';
+import { sharedConnection } from './shared-connection';
 
 /** The plan version that a till was last set to. */
 export class LiveTillRow extends Model<InferAttributes<LiveTillRow>, InferCreationAttributes<LiveTillRow>> {
@@ -20,3 +21,5 @@ export const defineLiveTillRow = (sequelize: Sequelize): void => {
     saidBy: { type: DataTypes.STRING(36), allowNull: true, defaultValue: null },
   }, { sequelize, tableName: 'live_tills', underscored: true, timestamps: false });
 };
+
+defineLiveTillRow(sharedConnection());

@@ -1,5 +1,6 @@
 import { DataTypes, Model, type CreationOptional, type InferAttributes, type InferCreationAttributes, type Sequelize } from 'sequelize';
 import type { Role } from '@/lib/domain/roles/permissions';
+import { sharedConnection } from './shared-connection';
 
 /** The one role a person has on one site. */
 export class MembershipRow extends Model<InferAttributes<MembershipRow>, InferCreationAttributes<MembershipRow>> {
@@ -19,3 +20,5 @@ export const defineMembershipRow = (sequelize: Sequelize): void => {
     title: { type: DataTypes.STRING(80), allowNull: false, defaultValue: '' },
   }, { sequelize, tableName: 'memberships', underscored: true, timestamps: false });
 };
+
+defineMembershipRow(sharedConnection());

@@ -1,4 +1,5 @@
 import { DataTypes, Model, type CreationOptional, type InferAttributes, type InferCreationAttributes, type Sequelize } from 'sequelize';
+import { sharedConnection } from './shared-connection';
 
 /** Choices that belong together. */
 export class OptionGroupRow extends Model<InferAttributes<OptionGroupRow>, InferCreationAttributes<OptionGroupRow>> {
@@ -22,3 +23,5 @@ export const defineOptionGroupRow = (sequelize: Sequelize): void => {
     version: { type: DataTypes.INTEGER, allowNull: false, defaultValue: 1 },
   }, { sequelize, tableName: 'option_groups', underscored: true, timestamps: false });
 };
+
+defineOptionGroupRow(sharedConnection());

@@ -1,5 +1,6 @@
 import { DataTypes, Model, type CreationOptional, type InferAttributes, type InferCreationAttributes, type Sequelize } from 'sequelize';
 import type { Allergen } from '@/lib/domain/site/menu';
+import { sharedConnection } from './shared-connection';
 
 /** A choice on an item. */
 export class OptionRow extends Model<InferAttributes<OptionRow>, InferCreationAttributes<OptionRow>> {
@@ -25,3 +26,5 @@ export const defineOptionRow = (sequelize: Sequelize): void => {
     version: { type: DataTypes.INTEGER, allowNull: false, defaultValue: 1 },
   }, { sequelize, tableName: 'options', underscored: true, timestamps: false });
 };
+
+defineOptionRow(sharedConnection());

@@ -1,4 +1,5 @@
 import { DataTypes, Model, type CreationOptional, type InferAttributes, type InferCreationAttributes, type Sequelize } from 'sequelize';
+import { sharedConnection } from './shared-connection';
 
 /** Someone who signs in; what they may do is said per site by a membership. */
 export class PersonRow extends Model<InferAttributes<PersonRow>, InferCreationAttributes<PersonRow>> {
@@ -20,3 +21,5 @@ export const definePersonRow = (sequelize: Sequelize): void => {
     createdAt: { type: DataTypes.DATE(3), allowNull: false },
   }, { sequelize, tableName: 'people', underscored: true, timestamps: false });
 };
+
+definePersonRow(sharedConnection());

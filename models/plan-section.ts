@@ -1,4 +1,5 @@
 import { DataTypes, Model, type InferAttributes, type InferCreationAttributes, type Sequelize } from 'sequelize';
+import { sharedConnection } from './shared-connection';
 
 /** A section that a plan offers, when it does not offer all. */
 export class PlanSectionRow extends Model<InferAttributes<PlanSectionRow>, InferCreationAttributes<PlanSectionRow>> {
@@ -14,3 +15,5 @@ export const definePlanSectionRow = (sequelize: Sequelize): void => {
     sectionId: { type: DataTypes.STRING(36), primaryKey: true, allowNull: false },
   }, { sequelize, tableName: 'plan_sections', underscored: true, timestamps: false });
 };
+
+definePlanSectionRow(sharedConnection());

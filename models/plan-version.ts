@@ -1,5 +1,6 @@
 import { DataTypes, Model, type CreationOptional, type InferAttributes, type InferCreationAttributes, type Sequelize } from 'sequelize';
 import type { PlanContent } from '@/lib/domain/site/plan';
+import { sharedConnection } from './shared-connection';
 
 /** A plan as it stood after one edit; kept for good. */
 export class PlanVersionRow extends Model<InferAttributes<PlanVersionRow>, InferCreationAttributes<PlanVersionRow>> {
@@ -23,3 +24,5 @@ export const definePlanVersionRow = (sequelize: Sequelize): void => {
     madeAt: { type: DataTypes.DATE(3), allowNull: false },
   }, { sequelize, tableName: 'plan_versions', underscored: true, timestamps: false });
 };
+
+definePlanVersionRow(sharedConnection());

@@ -1,4 +1,5 @@
 import { DataTypes, Model, type CreationOptional, type InferAttributes, type InferCreationAttributes, type Sequelize } from 'sequelize';
+import { sharedConnection } from './shared-connection';
 
 /** One complete set of rules, made for one service. */
 export class PlanRow extends Model<InferAttributes<PlanRow>, InferCreationAttributes<PlanRow>> {
@@ -20,3 +21,5 @@ export const definePlanRow = (sequelize: Sequelize): void => {
     version: { type: DataTypes.INTEGER, allowNull: false, defaultValue: 1 },
   }, { sequelize, tableName: 'plans', underscored: true, timestamps: false });
 };
+
+definePlanRow(sharedConnection());

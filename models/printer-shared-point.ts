@@ -1,4 +1,5 @@
 import { DataTypes, Model, type InferAttributes, type InferCreationAttributes, type Sequelize } from 'sequelize';
+import { sharedConnection } from './shared-connection';
 
 /** What a printer hangs on. */
 export class PrinterSharedPointRow extends Model<InferAttributes<PrinterSharedPointRow>, InferCreationAttributes<PrinterSharedPointRow>> {
@@ -14,3 +15,5 @@ export const definePrinterSharedPointRow = (sequelize: Sequelize): void => {
     sharedPointId: { type: DataTypes.STRING(36), primaryKey: true, allowNull: false },
   }, { sequelize, tableName: 'printer_shared_points', underscored: true, timestamps: false });
 };
+
+definePrinterSharedPointRow(sharedConnection());

@@ -1,5 +1,6 @@
 import { DataTypes, Model, type CreationOptional, type InferAttributes, type InferCreationAttributes, type Sequelize } from 'sequelize';
 import type { CodePage, Connection, Emphasis, PrinterStage, RollWidthMm } from '@/lib/domain/site/printer';
+import { sharedConnection } from './shared-connection';
 
 /** One ticket printer. */
 export class PrinterRow extends Model<InferAttributes<PrinterRow>, InferCreationAttributes<PrinterRow>> {
@@ -61,3 +62,5 @@ export const definePrinterRow = (sequelize: Sequelize): void => {
     version: { type: DataTypes.INTEGER, allowNull: false, defaultValue: 1 },
   }, { sequelize, tableName: 'printers', underscored: true, timestamps: false });
 };
+
+definePrinterRow(sharedConnection());

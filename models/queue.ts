@@ -1,5 +1,6 @@
 import { DataTypes, Model, type CreationOptional, type InferAttributes, type InferCreationAttributes, type Sequelize } from 'sequelize';
 import type { PortKind } from '@/lib/domain/site/till';
+import { sharedConnection } from './shared-connection';
 
 /** One printer as it is installed on one till. */
 export class QueueRow extends Model<InferAttributes<QueueRow>, InferCreationAttributes<QueueRow>> {
@@ -23,3 +24,5 @@ export const defineQueueRow = (sequelize: Sequelize): void => {
     testPrintedAt: { type: DataTypes.DATE(3), allowNull: true, defaultValue: null },
   }, { sequelize, tableName: 'queues', underscored: true, timestamps: false });
 };
+
+defineQueueRow(sharedConnection());

@@ -1,4 +1,5 @@
 import { DataTypes, Model, type InferAttributes, type InferCreationAttributes, type Sequelize } from 'sequelize';
+import { sharedConnection } from './shared-connection';
 
 /** An address that nothing new may take, and why. */
 export class ReservedAddressRow extends Model<InferAttributes<ReservedAddressRow>, InferCreationAttributes<ReservedAddressRow>> {
@@ -16,3 +17,5 @@ export const defineReservedAddressRow = (sequelize: Sequelize): void => {
     position: { type: DataTypes.INTEGER, allowNull: false },
   }, { sequelize, tableName: 'reserved_addresses', underscored: true, timestamps: false });
 };
+
+defineReservedAddressRow(sharedConnection());

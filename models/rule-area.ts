@@ -1,4 +1,5 @@
 import { DataTypes, Model, type InferAttributes, type InferCreationAttributes, type Sequelize } from 'sequelize';
+import { sharedConnection } from './shared-connection';
 
 /** An area that a rule names. */
 export class RuleAreaRow extends Model<InferAttributes<RuleAreaRow>, InferCreationAttributes<RuleAreaRow>> {
@@ -14,3 +15,5 @@ export const defineRuleAreaRow = (sequelize: Sequelize): void => {
     areaId: { type: DataTypes.STRING(36), primaryKey: true, allowNull: false },
   }, { sequelize, tableName: 'rule_areas', underscored: true, timestamps: false });
 };
+
+defineRuleAreaRow(sharedConnection());

@@ -1,5 +1,6 @@
 import { DataTypes, Model, type InferAttributes, type InferCreationAttributes, type Sequelize } from 'sequelize';
 import type { OrderType } from '@/lib/domain/site/order-types';
+import { sharedConnection } from './shared-connection';
 
 /** An order type that a rule names. */
 export class RuleOrderTypeRow extends Model<InferAttributes<RuleOrderTypeRow>, InferCreationAttributes<RuleOrderTypeRow>> {
@@ -15,3 +16,5 @@ export const defineRuleOrderTypeRow = (sequelize: Sequelize): void => {
     orderType: { type: DataTypes.STRING(24), primaryKey: true, allowNull: false },
   }, { sequelize, tableName: 'rule_order_types', underscored: true, timestamps: false });
 };
+
+defineRuleOrderTypeRow(sharedConnection());

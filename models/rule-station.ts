@@ -1,4 +1,5 @@
 import { DataTypes, Model, type InferAttributes, type InferCreationAttributes, type Sequelize } from 'sequelize';
+import { sharedConnection } from './shared-connection';
 
 /** A station that a rule sends to. */
 export class RuleStationRow extends Model<InferAttributes<RuleStationRow>, InferCreationAttributes<RuleStationRow>> {
@@ -16,3 +17,5 @@ export const defineRuleStationRow = (sequelize: Sequelize): void => {
     stationId: { type: DataTypes.STRING(36), allowNull: false },
   }, { sequelize, tableName: 'rule_stations', underscored: true, timestamps: false });
 };
+
+defineRuleStationRow(sharedConnection());

@@ -1,4 +1,5 @@
 import { DataTypes, Model, type InferAttributes, type InferCreationAttributes, type Sequelize } from 'sequelize';
+import { sharedConnection } from './shared-connection';
 
 /** A till that a rule names. */
 export class RuleTillRow extends Model<InferAttributes<RuleTillRow>, InferCreationAttributes<RuleTillRow>> {
@@ -14,3 +15,5 @@ export const defineRuleTillRow = (sequelize: Sequelize): void => {
     tillId: { type: DataTypes.STRING(36), primaryKey: true, allowNull: false },
   }, { sequelize, tableName: 'rule_tills', underscored: true, timestamps: false });
 };
+
+defineRuleTillRow(sharedConnection());

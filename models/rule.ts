@@ -1,5 +1,6 @@
 import { DataTypes, Model, type CreationOptional, type InferAttributes, type InferCreationAttributes, type Sequelize } from 'sequelize';
 import type { RuleKind, Target } from '@/lib/domain/site/plan';
+import { sharedConnection } from './shared-connection';
 
 /** Target and conditions to stations. */
 export class RuleRow extends Model<InferAttributes<RuleRow>, InferCreationAttributes<RuleRow>> {
@@ -29,3 +30,5 @@ export const defineRuleRow = (sequelize: Sequelize): void => {
     position: { type: DataTypes.INTEGER, allowNull: false },
   }, { sequelize, tableName: 'rules', underscored: true, timestamps: false });
 };
+
+defineRuleRow(sharedConnection());

@@ -1,4 +1,5 @@
 import { DataTypes, Model, type CreationOptional, type InferAttributes, type InferCreationAttributes, type Sequelize } from 'sequelize';
+import { sharedConnection } from './shared-connection';
 
 /** One sign-in on one device; ended at once by signing out. */
 export class SessionRow extends Model<InferAttributes<SessionRow>, InferCreationAttributes<SessionRow>> {
@@ -16,3 +17,5 @@ export const defineSessionRow = (sequelize: Sequelize): void => {
     endedAt: { type: DataTypes.DATE(3), allowNull: true, defaultValue: null },
   }, { sequelize, tableName: 'sessions', underscored: true, timestamps: false });
 };
+
+defineSessionRow(sharedConnection());

@@ -1,5 +1,6 @@
 import { DataTypes, Model, type InferAttributes, type InferCreationAttributes, type Sequelize } from 'sequelize';
 import type { SharedPointKind } from '@/lib/domain/site/site';
+import { sharedConnection } from './shared-connection';
 
 /** What several devices hang on. */
 export class SharedPointRow extends Model<InferAttributes<SharedPointRow>, InferCreationAttributes<SharedPointRow>> {
@@ -19,3 +20,5 @@ export const defineSharedPointRow = (sequelize: Sequelize): void => {
     position: { type: DataTypes.INTEGER, allowNull: false },
   }, { sequelize, tableName: 'shared_points', underscored: true, timestamps: false });
 };
+
+defineSharedPointRow(sharedConnection());

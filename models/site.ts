@@ -1,5 +1,6 @@
 import { DataTypes, Model, type CreationOptional, type InferAttributes, type InferCreationAttributes, type Sequelize } from 'sequelize';
 import type { FollowMode } from '@/lib/domain/site/site';
+import { sharedConnection } from './shared-connection';
 
 /** One restaurant at one address. */
 export class SiteRow extends Model<InferAttributes<SiteRow>, InferCreationAttributes<SiteRow>> {
@@ -57,3 +58,5 @@ export const defineSiteRow = (sequelize: Sequelize): void => {
     liveSince: { type: DataTypes.DATE(3), allowNull: true, defaultValue: null },
   }, { sequelize, tableName: 'sites', underscored: true, timestamps: false });
 };
+
+defineSiteRow(sharedConnection());

@@ -1,4 +1,5 @@
 import { DataTypes, Model, type InferAttributes, type InferCreationAttributes, type Sequelize } from 'sequelize';
+import { sharedConnection } from './shared-connection';
 
 /** A printer that a station reads, in the order they are tried. */
 export class StationPrinterRow extends Model<InferAttributes<StationPrinterRow>, InferCreationAttributes<StationPrinterRow>> {
@@ -16,3 +17,5 @@ export const defineStationPrinterRow = (sequelize: Sequelize): void => {
     printerId: { type: DataTypes.STRING(36), allowNull: false },
   }, { sequelize, tableName: 'station_printers', underscored: true, timestamps: false });
 };
+
+defineStationPrinterRow(sharedConnection());

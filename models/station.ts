@@ -1,5 +1,6 @@
 import { DataTypes, Model, type CreationOptional, type InferAttributes, type InferCreationAttributes, type Sequelize } from 'sequelize';
 import type { Mesh, StationColour, StationKind, TicketLayout } from '@/lib/domain/site/station';
+import { sharedConnection } from './shared-connection';
 
 /** Where work is done, or checked and sent out. */
 export class StationRow extends Model<InferAttributes<StationRow>, InferCreationAttributes<StationRow>> {
@@ -37,3 +38,5 @@ export const defineStationRow = (sequelize: Sequelize): void => {
     version: { type: DataTypes.INTEGER, allowNull: false, defaultValue: 1 },
   }, { sequelize, tableName: 'stations', underscored: true, timestamps: false });
 };
+
+defineStationRow(sharedConnection());

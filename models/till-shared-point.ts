@@ -1,4 +1,5 @@
 import { DataTypes, Model, type InferAttributes, type InferCreationAttributes, type Sequelize } from 'sequelize';
+import { sharedConnection } from './shared-connection';
 
 /** What a till hangs on. */
 export class TillSharedPointRow extends Model<InferAttributes<TillSharedPointRow>, InferCreationAttributes<TillSharedPointRow>> {
@@ -14,3 +15,5 @@ export const defineTillSharedPointRow = (sequelize: Sequelize): void => {
     sharedPointId: { type: DataTypes.STRING(36), primaryKey: true, allowNull: false },
   }, { sequelize, tableName: 'till_shared_points', underscored: true, timestamps: false });
 };
+
+defineTillSharedPointRow(sharedConnection());

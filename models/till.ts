@@ -1,5 +1,6 @@
 import { DataTypes, Model, type CreationOptional, type InferAttributes, type InferCreationAttributes, type Sequelize } from 'sequelize';
 import type { AddressSource, TillKind, TillSystem } from '@/lib/domain/site/till';
+import { sharedConnection } from './shared-connection';
 
 /** A device that sends orders. */
 export class TillRow extends Model<InferAttributes<TillRow>, InferCreationAttributes<TillRow>> {
@@ -37,3 +38,5 @@ export const defineTillRow = (sequelize: Sequelize): void => {
     version: { type: DataTypes.INTEGER, allowNull: false, defaultValue: 1 },
   }, { sequelize, tableName: 'tills', underscored: true, timestamps: false });
 };
+
+defineTillRow(sharedConnection());

@@ -1,4 +1,5 @@
 import { DataTypes, Model, type InferAttributes, type InferCreationAttributes, type Sequelize } from 'sequelize';
+import { sharedConnection } from './shared-connection';
 
 /** When a service starts, every week, on the site’s own clock. */
 export class WeeklyTimeRow extends Model<InferAttributes<WeeklyTimeRow>, InferCreationAttributes<WeeklyTimeRow>> {
@@ -16,3 +17,5 @@ export const defineWeeklyTimeRow = (sequelize: Sequelize): void => {
     start: { type: DataTypes.STRING(5), primaryKey: true, allowNull: false },
   }, { sequelize, tableName: 'weekly_times', underscored: true, timestamps: false });
 };
+
+defineWeeklyTimeRow(sharedConnection());

@@ -1,32 +1,20 @@
 import 'server-only';
-import { Sequelize, type Transaction } from 'sequelize';
-import { env } from '@/lib/env';
+import type { Sequelize, Transaction } from 'sequelize';
 import { defineAll } from '@/models/define-all';
+import { closeSharedConnection, makeConnection, sharedConnection } from '@/models/shared-connection';
 
-/** Numbers stay numbers, decimals stay exact, and an UPDATE counts the rows it found, not those it altered. */
-const connectorOptions = {
-  supportBigNumbers: false, bigIntAsNumber: true, checkNumberRange: true, decimalAsNumber: false, insertIdAsNumber: true,
-  logParam: false, foundRows: true, connectTimeout: 5_000,
-};
-
+/** A pool of its own, with the models tied to it: for tests that want a pool of one. */
 export const connect = (url: string, poolSize = 8): Sequelize => {
-  const sequelize = new Sequelize(url.replace(/^mysql:/, 'mariadb:'), {
-    dialect: 'mariadb', logging: false, timezone: '+00:00', dialectOptions: connectorOptions,
-    pool: { max: poolSize, min: 0, idle: 10_000, evict: 1_000, acquire: 8_000 },
-  });
+  const sequelize = makeConnection(() => url, poolSize);
   defineAll(sequelize);
   return sequelize;
 };
 
-const kept = globalThis as { tamisDatabase?: Sequelize };
-
-/** One pool for the process, also when the framework loads this module twice in development. */
-export const database = (): Sequelize => (kept.tamisDatabase ??= connect(env().DATABASE_URL));
+/** The one pool of the process. */
+export const database = (): Sequelize => sharedConnection();
 
 export const closeDatabase = async (): Promise<void> => {
-  const open = kept.tamisDatabase;
-  delete kept.tamisDatabase;
-  await open?.close();
+  defineAll(await closeSharedConnection());
 };
 
 type FailedStatement = { readonly name?: string; readonly original?: { readonly errno?: number }; readonly parent?: { readonly errno?: number } };

@@ -46,7 +46,7 @@ export function SignInForm({ next }: { readonly next: string }) {
     }
   };
   return (
-    <form onSubmit={(event) => void submit(event)} className="grid gap-4">
+    <form method="post" onSubmit={(event) => void submit(event)} className="grid gap-4">
       <div className="grid gap-1">
         <label htmlFor="email" className="text-[13.5px] font-semibold text-soft">E-mail</label>
         <input id="email" name="email" type="email" autoComplete="username" required className={input} />
