@@ -6,12 +6,10 @@ import { keepDemo } from './demo-data';
 import { signIn } from './people';
 import { keptFolder, keptPeople, stateOf, told, type DemoPerson } from './product';
 
-/** Before all browser tests: keeps a copy of the demo, and the cookies of one person for each role. */
+/** Before all browser tests: one person of each role signs in, then a copy is kept of the demo with these sessions in it. */
 export default async function signInOnce(config: FullConfig): Promise<void> {
   rmSync(keptFolder, { recursive: true, force: true });
   mkdirSync(keptFolder, { recursive: true, mode: 0o700 });
-  await keepDemo();
-
   const people = (await whoCanSignIn({ DATABASE_URL: told('DATABASE_URL'), TAMIS_DEMO_PASSWORD: told('TAMIS_DEMO_PASSWORD') })) as readonly DemoPerson[];
   writeFileSync(keptPeople, JSON.stringify(atOneSite(people)));
 
@@ -27,6 +25,7 @@ export default async function signInOnce(config: FullConfig): Promise<void> {
   } finally {
     await browser.close();
   }
+  await keepDemo();
 }
 
 /** The first site that has somebody for every role. */
