@@ -19,8 +19,8 @@ export function ConflictNotice({ words, differences, keepMine, takeTheirs }: Con
         </ul>
       )}
       <div className="flex flex-wrap gap-2">
-        <Button kind="primary" onClick={keepMine}>Save mine over it</Button>
-        <Button onClick={takeTheirs}>Take theirs, drop mine</Button>
+        <Button kind="primary" onClick={keepMine}>Save what I typed as well</Button>
+        <Button onClick={takeTheirs}>Drop what I typed</Button>
       </div>
     </div>
   );

@@ -20,6 +20,7 @@ export const fixInput = z.discriminatedUnion('kind', [
   z.object({ kind: z.literal('set-printer-mac'), printer: id, mac: z.string().trim().max(40), label }),
   z.object({ kind: z.literal('set-backup'), printer: id, backup: id, label }),
   z.object({ kind: z.literal('rename-queue'), till: id, printer: id, name, label }),
+  z.object({ kind: z.literal('rename-queues'), tills: z.array(id).min(1).max(500), printer: id, name, label }),
   z.object({ kind: z.literal('set-queue-port'), ...queue }),
   z.object({ kind: z.literal('add-queue'), name, ...queue }),
   z.object({ kind: z.literal('set-till-address'), till: id, address, label }),

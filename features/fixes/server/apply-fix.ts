@@ -1,6 +1,7 @@
 import 'server-only';
 import type { Transaction } from 'sequelize';
 import { fixPermissions } from '@/lib/domain/findings/fix-permissions';
+import type { Till } from '@/lib/domain/site/till';
 import { actIn, type Actor } from '@/lib/server/actor';
 import type { RowFix } from '../row-fix';
 import { changeNetwork, changeStandIn, reserveAddress } from './change-site';
@@ -8,7 +9,11 @@ import { changePrinter, changeTill } from './change-device';
 
 type Applied = { readonly done: string };
 
-const apply = (transaction: Transaction, actor: Actor, fix: RowFix): Promise<void> => {
+const retyped = ({ printer, name }: { readonly printer: string; readonly name: string }) => (till: Till): Till => ({
+  ...till, queues: till.queues.map((queue) => (queue.printer === printer ? { ...queue, typedName: name } : queue)),
+});
+
+const apply = async (transaction: Transaction, actor: Actor, fix: RowFix): Promise<void> => {
   const by = { siteId: actor.siteId, personId: actor.person.id };
   switch (fix.kind) {
     case 'rename-printer': return changePrinter(transaction, by, fix.printer, (printer) => ({ ...printer, name: fix.name }));
@@ -22,9 +27,11 @@ const apply = (transaction: Transaction, actor: Actor, fix: RowFix): Promise<voi
     case 'set-till-mask': return changeTill(transaction, by, fix.till, (till) => ({ ...till, mask: fix.mask }));
     case 'clear-prints-through': return changeTill(transaction, by, fix.till, (till) => ({ ...till, printsThrough: null }));
     case 'clear-default-printer': return changeTill(transaction, by, fix.till, (till) => ({ ...till, defaultPrinter: null }));
-    case 'rename-queue': return changeTill(transaction, by, fix.till, (till) => ({
-      ...till, queues: till.queues.map((queue) => (queue.printer === fix.printer ? { ...queue, typedName: fix.name } : queue)),
-    }));
+    case 'rename-queue': return changeTill(transaction, by, fix.till, retyped(fix));
+    case 'rename-queues': {
+      for (const till of fix.tills) await changeTill(transaction, by, till, retyped(fix));
+      return;
+    }
     case 'set-queue-port': return changeTill(transaction, by, fix.till, (till) => ({
       ...till, queues: till.queues.map((queue) => (queue.printer === fix.printer ? { ...queue, portKind: fix.portKind, portAddress: fix.portAddress } : queue)),
     }));

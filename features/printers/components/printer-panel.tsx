@@ -8,7 +8,7 @@ import { ConflictNotice } from '@/components/form/conflict-notice';
 import { LeaveGuard } from '@/components/form/leave-guard';
 import { TakeOffList } from '@/components/form/take-off-list';
 import { SidePanel } from '@/components/side-panel';
-import { printerDifferences, printerFacts } from '@/lib/domain/devices/printer-differences';
+import { printerFacts } from '@/lib/domain/devices/printer-differences';
 import { ProblemError } from '@/lib/http/client';
 import { takePrinterOff } from '../api/printers';
 import type { PanelView } from '../panel-view';
@@ -25,16 +25,15 @@ function EditPrinter({ view, close, leave, typed }: EditProps) {
   const router = useRouter();
   const of = usePrinterForm(view, { saved: () => { leave(); router.refresh(); }, readAgain: () => router.refresh() });
   const { formState } = of.form;
-  const newest = view.printer;
   const { isDirty } = formState;
   useEffect(() => typed(isDirty), [typed, isDirty]);
-  const theirs = of.base === null || newest === null || newest.version === of.base.version ? null : printerDifferences(of.base, newest, namingOf(view));
   return (
     <form noValidate onSubmit={(event) => void of.save(event)} className="grid gap-4">
       <PrinterFormFields of={of} view={view} />
-      {of.refused?.stale === true && theirs !== null ? (
-        <ConflictNotice words={of.refused.words} differences={theirs} keepMine={of.keepMine} takeTheirs={of.takeTheirs} />
+      {of.refused?.stale === true && of.theirs !== null ? (
+        <ConflictNotice words={of.refused.words} differences={of.theirs} keepMine={of.keepMine} takeTheirs={of.takeTheirs} />
       ) : of.refused === null ? null : <p role="alert" className="text-[13.5px] font-semibold text-hot-text">{of.refused.words}</p>}
+      {of.testsFall ? <p className="text-[13px] text-look-text">Once this is saved, its printed tests no longer count: print one from each till again.</p> : null}
       <div className="sticky bottom-0 flex gap-2 border-t border-line bg-panel py-3">
         <Button type="submit" kind="primary" disabled={formState.isSubmitting}>{of.base === null ? 'Add it' : 'Save'}</Button>
         <Button onClick={close}>Cancel</Button>

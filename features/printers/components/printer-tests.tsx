@@ -1,6 +1,6 @@
 'use client';
 
-import { useState, useTransition } from 'react';
+import { useEffect, useRef, useState, useTransition } from 'react';
 import { FormPart } from '@/components/form/form-part';
 import { sayInstant } from '@/lib/domain/devices/say-instant';
 import { ProblemError } from '@/lib/http/client';
@@ -19,6 +19,10 @@ type TestsProps = { readonly view: PanelView; readonly printer: string; readonly
 export function PrinterTests({ view, printer, changed }: TestsProps) {
   const [refused, setRefused] = useState('');
   const [busy, startTransition] = useTransition();
+  const place = useRef<HTMLDivElement>(null);
+  useEffect(() => {
+    if (window.location.hash === '#tests') place.current?.scrollIntoView();
+  }, []);
   const note = (till: string, printed: boolean): void => startTransition(async () => {
     try {
       await notePrintedTest(view.siteId, printer, { till, printed });
@@ -30,7 +34,8 @@ export function PrinterTests({ view, printer, changed }: TestsProps) {
     }
   });
   return (
-    <FormPart title="Tests" id="tests">
+    <div ref={place} className="scroll-mt-16">
+      <FormPart title="Tests">
       <p className="text-[13px] text-soft">Print a test page from each till, see it come out, then say so here.</p>
       <ul className="grid gap-px overflow-hidden rounded-md border border-line bg-line">
         {view.tests.map((test) => (
@@ -53,5 +58,6 @@ export function PrinterTests({ view, printer, changed }: TestsProps) {
       </ul>
       <p role="status" className="text-[12.5px] font-semibold text-hot-text empty:hidden">{refused}</p>
     </FormPart>
+    </div>
   );
 }

@@ -4,6 +4,7 @@ import { zodResolver } from '@hookform/resolvers/zod';
 import { useDeferredValue, useMemo, useState } from 'react';
 import { useForm, useWatch, type FieldPath } from 'react-hook-form';
 import { checkPrinterDraft } from '@/lib/domain/checks/check-draft';
+import { printerTestsStand } from '@/lib/domain/checks/test-stands';
 import { printerDifferences } from '@/lib/domain/devices/printer-differences';
 import type { Finding, Fix } from '@/lib/domain/findings/finding';
 import type { Printer } from '@/lib/domain/site/printer';
@@ -37,6 +38,9 @@ export const usePrinterForm = (view: PanelView, { saved, readAgain }: Done) => {
     return untouchedNew ? found.filter((finding) => finding.subject.field !== 'name') : found;
   }, [view.site, typed, base, untouchedNew]);
 
+  const naming = { ...view.site, sharedPoints: view.sharedPoints };
+  const theirs = base === null || view.printer === null || view.printer.version === base.version ? null : printerDifferences(base, view.printer, naming);
+
   const findingsOf = (field: FieldPath<PrinterInput>): readonly Finding[] => findings.filter((finding) => finding.subject.field === field);
   const fixIn = (fix: Fix): (() => void) | null => {
     const fields = fieldsOfFix(fix);
@@ -63,16 +67,27 @@ export const usePrinterForm = (view: PanelView, { saved, readAgain }: Done) => {
     }
   });
 
+  const testsFall = base !== null && view.tests.some((test) => test.testPrintedAt !== null) && !printerTestsStand(base, printerOfInput(typed, base.id, base));
+
   return {
     form,
+    /** True while saving would make the printed tests count for nothing. */
+    testsFall,
     base,
     refused,
     findingsOf,
     fixIn,
     save: saveFrom(base),
     /** Saves what is typed on top of what somebody else saved. */
+    theirs,
+    /** Saves what was typed on top of what somebody else saved; what was not touched stays theirs. */
     keepMine: () => {
+      if (base === null || view.printer === null) return;
+      const typedNow = form.getValues();
+      const touched = printerDifferences(base, printerOfInput(typedNow, base.id, base), naming).map(({ field }) => field);
       setBase(view.printer);
+      form.reset(inputOfPrinter(view.printer));
+      for (const field of touched) form.setValue(field, typedNow[field], { shouldDirty: true });
       void saveFrom(view.printer)();
     },
     takeTheirs: () => {

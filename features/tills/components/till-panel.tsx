@@ -8,7 +8,7 @@ import { ConflictNotice } from '@/components/form/conflict-notice';
 import { LeaveGuard } from '@/components/form/leave-guard';
 import { TakeOffList } from '@/components/form/take-off-list';
 import { SidePanel } from '@/components/side-panel';
-import { tillDifferences, tillFacts } from '@/lib/domain/devices/till-differences';
+import { tillFacts } from '@/lib/domain/devices/till-differences';
 import { ProblemError } from '@/lib/http/client';
 import { takeTillOff } from '../api/tills';
 import type { PanelView } from '../panel-view';
@@ -22,13 +22,11 @@ function EditTill({ view, close, leave, typed }: EditProps) {
   const of = useTillForm(view, { saved: () => { leave(); router.refresh(); }, readAgain: () => router.refresh() });
   const { isDirty, isSubmitting } = of.form.formState;
   useEffect(() => typed(isDirty), [typed, isDirty]);
-  const newest = view.till;
-  const theirs = of.base === null || newest === null || newest.version === of.base.version ? null : tillDifferences(of.base, newest, namingOf(view));
   return (
     <form noValidate onSubmit={(event) => void of.save(event)} className="grid gap-4">
       <TillFormFields of={of} view={view} />
-      {of.refused?.stale === true && theirs !== null ? (
-        <ConflictNotice words={of.refused.words} differences={theirs} keepMine={of.keepMine} takeTheirs={of.takeTheirs} />
+      {of.refused?.stale === true && of.theirs !== null ? (
+        <ConflictNotice words={of.refused.words} differences={of.theirs} keepMine={of.keepMine} takeTheirs={of.takeTheirs} />
       ) : of.refused === null ? null : <p role="alert" className="text-[13.5px] font-semibold text-hot-text">{of.refused.words}</p>}
       <div className="sticky bottom-0 flex gap-2 border-t border-line bg-panel py-3">
         <Button type="submit" kind="primary" disabled={isSubmitting}>{of.base === null ? 'Add it' : 'Save'}</Button>

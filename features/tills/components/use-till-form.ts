@@ -35,6 +35,8 @@ export const useTillForm = (view: PanelView, { saved, readAgain }: Done) => {
   const typed = useDeferredValue(useWatch({ control: form.control }) as TillInput);
   const findings = useMemo(() => checkTillDraft(view.site, tillOfInput(typed, base?.id ?? newTillId, base?.version ?? 1)), [view.site, typed, base]);
 
+  const theirs = base === null || view.till === null || view.till.version === base.version ? null : tillDifferences(base, view.till, namingOf(view));
+
   const findingsOf = (field: string): readonly Finding[] => findings.filter((finding) => finding.subject.field === field);
   const fixIn = (fix: Fix): (() => void) | null => {
     if (fieldsOfFix(fix, typed) === null) return null;
@@ -68,8 +70,15 @@ export const useTillForm = (view: PanelView, { saved, readAgain }: Done) => {
     findingsOf,
     fixIn,
     save: saveFrom(base),
+    theirs,
+    /** Saves what was typed on top of what somebody else saved; what was not touched stays theirs. */
     keepMine: () => {
+      if (base === null || view.till === null) return;
+      const typedNow = form.getValues();
+      const touched = tillDifferences(base, tillOfInput(typedNow, base.id, base.version), namingOf(view)).map(({ field }) => field);
       setBase(view.till);
+      form.reset(inputOfTill(view.till));
+      for (const field of touched) form.setValue(field, typedNow[field], { shouldDirty: true });
       void saveFrom(view.till)();
     },
     takeTheirs: () => {

@@ -16,7 +16,7 @@ const plan = aPlan([
   aRule('pass', 'copy', { kind: 'everything' }, ['Pass']),
 ]);
 const well: Site = aSite({
-  areas: [{ id: asId('main'), name: 'Main room' }],
+  areas: [{ id: asId('main'), name: 'Main room', version: 1 }],
   printers: [aPrinter('GRILL1', '10.20.30.201', { backup: asId('SAUCE1') }), aPrinter('SAUCE1', '10.20.30.203'), aPrinter('BAR1', '10.20.30.205'), aPrinter('PASS1', '10.20.30.210')],
   stations: [aStation('Grill', ['GRILL1']), aStation('Sauce', ['SAUCE1']), aStation('Bar', ['BAR1']), aStation('Pass', ['PASS1'], { kind: 'pass' })],
   tills: [till('Till 1', 61), till('Till 2', 62, { queues: queuesFor('GRILL1', 'SAUCE1', 'PASS1', 'BAR1') })],

@@ -50,9 +50,9 @@ describe('a printed test', () => {
   it('of one device says nothing of its replacement', () => {
     expect(printerTestsStand({ ...before, serial: 'A1' }, { ...before, serial: 'B2' })).toBe(false);
   });
-  it('of a queue stands while the queue is the same', () => {
-    const queue = { portKind: 'tcp' as const, portAddress: '10.20.30.201', typedName: 'GRILL1' };
-    expect([queueTestStands(queue, { ...queue }), queueTestStands(queue, { ...queue, portAddress: '10.20.30.9' })]).toEqual([true, false]);
+  it('of a queue stands while its port is the same', () => {
+    const queue = { portKind: 'tcp' as const, portAddress: '10.20.30.201' };
+    expect([queueTestStands(queue, { ...queue }), queueTestStands(queue, { ...queue, portAddress: '10.20.30.9' }), queueTestStands(queue, { ...queue, portKind: 'shared' })]).toEqual([true, false, false]);
   });
   it('takes its stage along when it falls', () => {
     expect([stageWithoutTests('planned'), stageWithoutTests('signed-off')]).toEqual(['planned', 'addressed']);

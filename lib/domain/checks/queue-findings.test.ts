@@ -27,6 +27,12 @@ it('stops a name typed differently, even in case alone', () => {
   }
 });
 
+it('offers to say it once when several tills have the same old name', () => {
+  const tills = ['Till 1', 'Till 2'].map((name) => tillWith(aQueue('PASS1', { typedName: 'PASS 1' }), name));
+  const [finding] = queueFindings(aSite({ printers: [pass], tills }), tills[0]!);
+  expect(finding?.fixes.at(-1)).toEqual({ kind: 'rename-queues', tills: ['Till 1', 'Till 2'], printer: 'PASS1', name: 'PASS1', label: 'All 2 tills read PASS1 now' });
+});
+
 it('says where a queue on a parallel port leads, and where it should', () => {
   expect(findingsOf(tillWith(aQueue('PASS1', { portKind: 'parallel', portAddress: 'LPT1:' })))).toMatchObject([{
     code: 'queue-parallel-nothing', severity: 'stop', title: 'On Till 3, PASS1 goes to a parallel port',

@@ -7,7 +7,16 @@ import type { Queue, Till } from '../site/till';
 
 export type QueueSite = Pick<Site, 'printers' | 'tills'>;
 
-type Judged = { readonly till: Till; readonly printer: Printer; readonly queue: Queue; readonly host: Till | undefined; readonly subject: Subject; readonly direct: readonly Fix[] };
+type Judged = {
+  readonly till: Till;
+  readonly printer: Printer;
+  readonly queue: Queue;
+  readonly host: Till | undefined;
+  readonly subject: Subject;
+  readonly direct: readonly Fix[];
+  /** Every till on which this printer is typed in the same wrong way, this one included. */
+  readonly alsoTyped: readonly string[];
+};
 
 type QueueRule = {
   readonly code: string;
@@ -54,7 +63,10 @@ const rules: readonly QueueRule[] = [
     applies: ({ queue, printer }) => queue.typedName !== printer.name,
     title: ({ till, printer, queue }) => `On ${till.name}, ${printer.name} is typed ${queue.typedName === '' ? 'with no name' : visibleName(queue.typedName)}`,
     message: ({ printer }) => `The name must be the same on every till, letter for letter. Type ${printer.name} there, then say so here.`,
-    fixes: ({ till, printer }) => [{ kind: 'rename-queue', till: till.id, printer: printer.id, name: printer.name, label: `It reads ${printer.name} now` }],
+    fixes: ({ till, printer, alsoTyped }) => [
+      { kind: 'rename-queue', till: till.id, printer: printer.id, name: printer.name, label: `It reads ${printer.name} now` },
+      ...(alsoTyped.length < 2 ? [] : [{ kind: 'rename-queues' as const, tills: alsoTyped, printer: printer.id, name: printer.name, label: `All ${alsoTyped.length} tills read ${printer.name} now` }]),
+    ],
   },
   {
     code: 'queue-parallel-nothing', severity: 'stop', field: 'portKind',
@@ -84,13 +96,16 @@ const wrongPortOnly = (queue: Queue, printer: Printer): string => {
   return found !== null && found.address === printer.address && found.port !== null ? `, port ${found.port}` : '';
 };
 
+const tillsTyping = (site: QueueSite, { printer, typedName }: Queue): readonly string[] =>
+  site.tills.filter((till) => till.queues.some((queue) => queue.printer === printer && queue.typedName === typedName)).map((till) => till.id);
+
 /** What is wrong with the queues as they are installed on one till. `field` says where in the till's form. */
 export const queueFindings = (site: QueueSite, till: Till): readonly Finding[] =>
   till.queues.flatMap((queue, index) => {
     const printer = site.printers.find((one) => one.id === queue.printer);
     if (printer === undefined) return [];
     const host = site.tills.find((one) => one.id === printer.hostTill && printer.connection !== 'network');
-    const judged: Judged = { till, printer, queue, host, subject: { kind: 'queue', id: printer.id, till: till.id }, direct: directFixes(printer, till) };
+    const judged: Judged = { till, printer, queue, host, subject: { kind: 'queue', id: printer.id, till: till.id }, direct: directFixes(printer, till), alsoTyped: tillsTyping(site, queue) };
     return rules.filter((rule) => rule.applies(judged)).map((rule): Finding => ({
       code: rule.code, severity: rule.severity, subject: { ...judged.subject, field: `queues.${index}.${rule.field}` },
       title: rule.title(judged), message: rule.message(judged), fixes: rule.fixes(judged),

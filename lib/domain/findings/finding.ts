@@ -27,6 +27,7 @@ export type Subject = {
 export type Fix =
   | { readonly kind: 'rename-printer'; readonly printer: string; readonly name: string; readonly label: string }
   | { readonly kind: 'rename-queue'; readonly till: string; readonly printer: string; readonly name: string; readonly label: string }
+  | { readonly kind: 'rename-queues'; readonly tills: readonly string[]; readonly printer: string; readonly name: string; readonly label: string }
   | { readonly kind: 'set-queue-port'; readonly till: string; readonly printer: string; readonly portKind: PortKind; readonly portAddress: string; readonly label: string }
   | { readonly kind: 'add-queue'; readonly till: string; readonly printer: string; readonly name: string; readonly portKind: PortKind; readonly portAddress: string; readonly label: string }
   | { readonly kind: 'set-printer-address'; readonly printer: string; readonly address: string; readonly label: string }

@@ -12,6 +12,7 @@ export const fixPermissions = {
   'set-backup': 'printer.set-backup',
   'print-test': 'printer.test',
   'rename-queue': 'till.write',
+  'rename-queues': 'till.write',
   'set-queue-port': 'till.write',
   'add-queue': 'till.write',
   'set-till-address': 'till.write',
