@@ -26,12 +26,24 @@ export async function demoPeople({ DATABASE_URL, TAMIS_DEMO_PASSWORD }) {
   return rows.filter(({ hash }) => opens.get(hash)).map(({ email, name, site, siteId, role, title }) => ({ email, name, site, siteId, role, title }));
 }
 
+/** "owner at Lantern Yard", and for somebody of several sites "installer at Lantern Yard and Pilgrim's Oven". */
+function placesOf(memberships) {
+  const roles = [...new Set(memberships.map(({ role }) => role))];
+  const sitesAs = (wanted) => memberships.filter(({ role }) => role === wanted).map(({ site }) => site);
+  return roles.map((role) => `${role} at ${sitesAs(role).join(' and ')}`).join(', ');
+}
+
 /** The demo people as a table, with the one password that they share. */
 export function tableOfSignIns(people, password) {
   if (people.length === 0) return 'Sign in with the account that you were invited with.';
-  const widthOf = (column) => Math.max(...people.map((person) => person[column].length));
-  const [email, name, role] = ['email', 'name', 'role'].map(widthOf);
-  const lines = people.map((person) => `  ${person.email.padEnd(email)}  ${person.name.padEnd(name)}  ${person.role.padEnd(role)}  ${person.site}`);
+  const emails = [...new Set(people.map(({ email }) => email))];
+  const rows = emails.map((email) => {
+    const memberships = people.filter((person) => person.email === email);
+    return { email, name: memberships[0].name, places: placesOf(memberships) };
+  });
+  const widthOf = (column) => Math.max(...rows.map((row) => row[column].length));
+  const [email, name] = ['email', 'name'].map(widthOf);
+  const lines = rows.map((row) => `  ${row.email.padEnd(email)}  ${row.name.padEnd(name)}  ${row.places}`);
   return `Sign in as any of these, with the password ${password}\n\n${lines.join('\n')}`;
 }
 

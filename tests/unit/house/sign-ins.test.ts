@@ -1,16 +1,19 @@
 import { expect, test } from 'vitest';
 import { tableOfSignIns } from '@/scripts/house/sign-ins.mjs';
 
-test('the last words of a start are the people who can sign in, and with what', () => {
+const member = (email: string, name: string, role: string, site: string) => ({ email, name, role, site, siteId: site, title: '' });
+
+test('the last words of a start are the people who can sign in, each once, and with what', () => {
   const people = [
-    { email: 'mara@lantern.example', name: 'Mara Quist', role: 'owner', site: 'Lantern Yard', siteId: 'lantern-yard', title: '' },
-    { email: 'jo@lantern.example', name: 'Jo Aldane', role: 'installer', site: 'Lantern Yard', siteId: 'lantern-yard', title: '' },
+    member('mara@lantern.example', 'Mara Quist', 'owner', 'Lantern Yard'),
+    member('jo@lantern.example', 'Jo Aldane', 'installer', 'Lantern Yard'),
+    member('jo@lantern.example', 'Jo Aldane', 'installer', 'Salt Lane'),
   ];
   expect(tableOfSignIns(people, 'word').split('\n')).toEqual([
     'Sign in as any of these, with the password word',
     '',
-    '  mara@lantern.example  Mara Quist  owner      Lantern Yard',
-    '  jo@lantern.example    Jo Aldane   installer  Lantern Yard',
+    '  mara@lantern.example  Mara Quist  owner at Lantern Yard',
+    '  jo@lantern.example    Jo Aldane   installer at Lantern Yard and Salt Lane',
   ]);
 });
 
