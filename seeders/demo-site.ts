@@ -6,11 +6,11 @@ import { slug } from './slug';
 
 export type DemoPlan = { readonly name: string; readonly weeklyTimes: readonly WeeklyTime[]; readonly versions: readonly PlanVersion[] };
 
-/** A restaurant as data: what it is, every version of its plans, and which of them is live. */
+/** A restaurant as data: what it is, every version of its plans, and which of them is live, if one is. */
 export type DemoSite = {
   readonly siteTestedAt: (testedAt: string) => Omit<Site, 'plans' | 'live'>;
   readonly plans: readonly DemoPlan[];
-  readonly live: { readonly plan: string; readonly version: number };
+  readonly live: { readonly plan: string; readonly version: number } | null;
 };
 
 export const planId = (name: string): Plan['id'] => asId(slug(name));

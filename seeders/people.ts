@@ -5,7 +5,10 @@ export type DemoPerson = { readonly id: string; readonly name: string; readonly 
 
 const member = (site: string, role: Role, title: string, mayOverride = false): DemoMembership => ({ site, role, title, mayOverride });
 
-/** Everybody who can sign in to the demo, with a person for each role on both sites. Femi and Tomas work on both. */
+/**
+ * People who do not exist, at example addresses as RFC 2606 sets them aside: everybody who can sign in to the demo, with a
+ * person for each role on both sites. Femi and Tomas work on both.
+ */
 export const people: readonly DemoPerson[] = [
   { id: 'marguerite-adeyemi', name: 'Marguerite Adeyemi', email: 'marguerite@lanternyard.example', memberships: [member('lantern-yard', 'owner', 'owner')] },
   { id: 'ines-okafor', name: 'Ines Okafor', email: 'ines@lanternyard.example', memberships: [member('lantern-yard', 'chef', 'head chef', true)] },

@@ -33,7 +33,8 @@ export const versionsOf = (site: BoardOf, plan: string, offers: readonly string[
   const board = boardSiteOf(site as Site);
   let rule = 0;
   const newId = () => asId<never>(`${slug(plan)}-${(rule += 1)}`);
-  const first: PlanVersion = { number: 1, content: { offers: offers?.map((section) => asId(slug(section))) ?? null, rules: [] }, summary: 'Plan made' };
+  const offered = offers === null ? null : site.menu.sections.filter(({ name }) => offers.includes(name)).map(({ id }) => id);
+  const first: PlanVersion = { number: 1, content: { offers: offered, rules: [] }, summary: 'Plan made' };
   return edits.reduce<readonly PlanVersion[]>((versions, edit) => {
     const content = versions.at(-1)?.content ?? first.content;
     return [...versions, { number: versions.length + 1, content: applyEdit(content, edit, newId), summary: describeEdit(edit, board, content) }];

@@ -1,4 +1,5 @@
 import type { Transaction } from 'sequelize';
+import type { Site } from '@/lib/domain/site/site';
 import { insertSite, type PlanVersionRecord } from '@/lib/server/site-store';
 import { setLivePlan } from '@/lib/server/live-plan';
 import { hashPassword } from '@/lib/server/password';
@@ -25,18 +26,23 @@ const historyOf = (plan: DemoPlan, liveVersion: number, madeBy: string, now: Dat
     return { number, content, summary, madeBy, madeAt: new Date(now.getTime() - agoMs) };
   });
 
+/** Live since the last time its service began, and in force on every till. */
+const putLive = async (transaction: Transaction, { plans, live }: DemoSite, site: Site, madeBy: string, now: Date): Promise<void> => {
+  const plan = plans.find(({ name }) => name === live?.plan);
+  if (live === null || plan === undefined) return;
+  const since = lastStart(now, plan.weeklyTimes[0]?.start ?? '00:00', site.timeZone).toISOString();
+  await setLivePlan(transaction, site.id, { planId: planId(plan.name), version: live.version, since, inForceOn: site.tills.map(({ id }) => id) }, madeBy);
+};
+
 const seedSite = async (transaction: Transaction, demo: DemoSite, madeBy: string, now: Date): Promise<void> => {
   const site = siteOf(demo, new Date(now.getTime() - 9 * dayMs).toISOString());
-  const live = demo.plans.find((plan) => plan.name === demo.live.plan);
-  if (live === undefined) throw new Error(`The demo has no plan ${demo.live.plan}.`);
-  const histories = new Map(demo.plans.map((plan) => [planId(plan.name), historyOf(plan, plan === live ? demo.live.version : plan.versions.length, madeBy, now)]));
+  const histories = new Map(demo.plans.map((plan) => [planId(plan.name), historyOf(plan, demo.live?.plan === plan.name ? demo.live.version : plan.versions.length, madeBy, now)]));
   await insertSite(transaction, site, now, (plan) => histories.get(plan.id) ?? []);
-  const since = lastStart(now, live.weeklyTimes[0]?.start ?? '00:00', site.timeZone).toISOString();
-  await setLivePlan(transaction, site.id, { planId: planId(live.name), version: demo.live.version, since, inForceOn: site.tills.map(({ id }) => id) }, madeBy);
-  const edits = demo.plans.flatMap((plan) => (histories.get(planId(plan.name)) ?? []).map((version) => ({ plan, ...version })))
+  await putLive(transaction, demo, site, madeBy, now);
+  const edits = site.plans.flatMap(({ id, name }) => (histories.get(id) ?? []).map((version) => ({ id, name, ...version })))
     .toSorted((left, right) => left.madeAt.getTime() - right.madeAt.getTime());
-  await ChangeRow.bulkCreate(edits.map(({ plan, number, summary, madeAt }) => ({
-    siteId: site.id, personId: madeBy, at: madeAt, action: 'plan.edited', subjectKind: 'plan', subjectId: planId(plan.name), summary: `${plan.name}: ${summary}`, afterValue: { version: number },
+  await ChangeRow.bulkCreate(edits.map(({ id, name, number, summary, madeAt }) => ({
+    siteId: site.id, personId: madeBy, at: madeAt, action: 'plan.edited', subjectKind: 'plan', subjectId: id, summary: `${name}: ${summary}`, afterValue: { version: number },
   })), { transaction });
   await SiteRow.update({ revision: edits.length }, { where: { id: site.id }, transaction });
 };

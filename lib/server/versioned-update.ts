@@ -29,8 +29,8 @@ type Versioned = Model & { readonly version: number };
 
 export type RowKey = { readonly siteId: string; readonly id: string; readonly version: number };
 
-/** "OptionGroupRow" is an "option-group" in history. */
-const kindOf = (model: ModelStatic<Versioned>): string => model.name.replace(/Row$/, '').replace(/([a-z])([A-Z])/g, '$1-$2').toLowerCase();
+/** The table "option_groups" holds what history calls an "option-group". A class's name would not do: a build shortens it. */
+const kindOf = (model: ModelStatic<Versioned>): string => model.tableName.replace(/s$/, '').replaceAll('_', '-');
 
 /** A site's own row has no site beside it. */
 const rowAt = (model: ModelStatic<Versioned>, { siteId, id }: Pick<RowKey, 'siteId' | 'id'>): object => ('siteId' in model.getAttributes() ? { siteId, id } : { id });

@@ -2,7 +2,7 @@ import { asId } from '@/lib/domain/site/ids';
 import type { Site } from '@/lib/domain/site/site';
 import type { DemoSite } from '../demo-site';
 import { send, sendItem, splitOption, versionsOf } from '../plan-history';
-import { devicesTestedAt } from './devices';
+import { devices } from './devices';
 import { menu } from './menu';
 
 const surroundings: Pick<Site, 'network' | 'contacts' | 'courses' | 'sharedPoints' | 'areas'> = {
@@ -13,14 +13,14 @@ const surroundings: Pick<Site, 'network' | 'contacts' | 'courses' | 'sharedPoint
   areas: [{ id: asId('shop'), name: 'Shop', version: 1 }, { id: asId('garden'), name: 'Garden', version: 1 }],
 };
 
-const board = { menu, areas: surroundings.areas, ...devicesTestedAt('2026-01-01T00:00:00.000Z') };
+const board = { menu, areas: surroundings.areas, ...devices };
 const everyDayEdits = [
   send(['Bread', 'Pastries', 'Hot from the oven'], 'Oven'), send(['Sandwiches and soup'], 'Bench'), send(['Coffee and cold drinks'], 'Coffee'), splitOption('bread-warmed-through', 'Oven'),
 ];
 const marketEdits = [send(['Bread', 'Pastries'], 'Bench'), send(['Hot from the oven'], 'Oven'), send(['Coffee and cold drinks'], 'Coffee'), sendItem('Cheese scone', 'Oven')];
 const weekdays = [1, 2, 3, 4, 5];
 
-/** A bakery with a few tables, where nothing is wrong. */
+/** A bakery with a few tables, not open yet: its plans are made, nothing is live, and no printer has printed. */
 export const pilgrimsOven: DemoSite = {
   plans: [
     { name: 'Every day', weeklyTimes: [...weekdays, 7].map((weekday) => ({ weekday, start: '06:30' })), versions: versionsOf(board, 'Every day', null, everyDayEdits) },
@@ -29,10 +29,10 @@ export const pilgrimsOven: DemoSite = {
       versions: versionsOf(board, 'Market day', ['Bread', 'Pastries', 'Hot from the oven', 'Coffee and cold drinks', 'Gifts'], marketEdits),
     },
   ],
-  live: { plan: 'Every day', version: everyDayEdits.length + 1 },
-  siteTestedAt: (testedAt) => ({
+  live: null,
+  siteTestedAt: () => ({
     id: asId('pilgrims-oven'), name: "Pilgrim's Oven", place: 'Haverlow', timeZone: 'Europe/London', language: 'en-GB',
     namingPolicy: { minLength: 2, maxLength: 12, allowUnderscore: true, allowHyphen: true, mustStartWithLetter: true },
-    follows: 'by-hand', link: { kind: 'none' }, version: 1, menu, ...surroundings, ...devicesTestedAt(testedAt),
+    follows: 'by-hand', link: { kind: 'none' }, version: 1, menu, ...surroundings, ...devices,
   }),
 };
