@@ -17,23 +17,25 @@ export const isLostConnection = (error: unknown): boolean => error instanceof Pr
 
 export type SendOptions = {
   readonly body?: unknown;
+  /** Bytes as they are, in place of JSON. */
+  readonly file?: Blob;
   /** The version the change was made from; sent as If-Match. */
   readonly version?: number;
   readonly signal?: AbortSignal;
 };
 
 /** Sends JSON and gives the answer, or throws a `ProblemError` with a sentence for every failure there is. */
-export const send = async <Answer>(method: 'GET' | 'POST' | 'PUT' | 'PATCH' | 'DELETE', url: string, { body, version, signal }: SendOptions = {}): Promise<Answer> => {
+export const send = async <Answer>(method: 'GET' | 'POST' | 'PUT' | 'PATCH' | 'DELETE', url: string, { body, file, version, signal }: SendOptions = {}): Promise<Answer> => {
   let response: Response;
   try {
     response = await fetch(url, {
       method,
       headers: {
         Accept: 'application/json',
-        ...(method === 'GET' ? {} : { 'Content-Type': 'application/json' }),
+        ...(method === 'GET' ? {} : { 'Content-Type': file === undefined ? 'application/json' : 'application/octet-stream' }),
         ...(version === undefined ? {} : { 'If-Match': `"${version}"` }),
       },
-      ...(method === 'GET' ? {} : { body: JSON.stringify(body ?? {}) }),
+      ...(method === 'GET' ? {} : { body: file ?? JSON.stringify(body ?? {}) }),
       ...(signal === undefined ? {} : { signal }),
     });
   } catch (error) {

@@ -4,7 +4,6 @@ import type { Transaction } from 'sequelize';
 import { decodeFile } from '@/lib/domain/menu-file/decode-file';
 import { guessMapping, menuFields, type Mapping } from '@/lib/domain/menu-file/fields';
 import { planImport, type ImportPlan } from '@/lib/domain/menu-file/plan-import';
-import type { LineError } from '@/lib/domain/menu-file/read-items';
 import { readTable, type Table } from '@/lib/domain/menu-file/read-table';
 import { writeMenuFile } from '@/lib/domain/menu-file/write-file';
 import type { Site } from '@/lib/domain/site/site';
@@ -17,25 +16,10 @@ import { ItemOptionGroupRow } from '@/models/item-option-group';
 import { OptionRow } from '@/models/option';
 import { OptionGroupRow } from '@/models/option-group';
 import { SectionRow } from '@/models/section';
+import type { DryRun } from '../dry-run';
 
 /** More lines than this are counted, not listed: nobody mends three thousand lines by reading them here. */
 const mostErrors = 200;
-
-/** What the wizard shows: the columns, what would happen, and the menu it was checked against. */
-export type DryRun = {
-  readonly headings: readonly string[];
-  readonly sample: readonly (readonly string[])[];
-  readonly mapping: Mapping;
-  readonly creates: number;
-  readonly updates: number;
-  readonly unchanged: number;
-  readonly sections: readonly string[];
-  readonly groups: readonly string[];
-  readonly errors: readonly LineError[];
-  readonly errorCount: number;
-  readonly digest: string;
-  readonly applied: boolean;
-};
 
 export const menuDigest = (site: Pick<Site, 'menu' | 'courses'>): string =>
   createHash('sha256').update(JSON.stringify([site.menu, site.courses])).digest('hex');

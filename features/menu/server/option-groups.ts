@@ -36,7 +36,7 @@ export const createOptionGroup = (actor: Actor, input: OptionGroupInput): Promis
     const position = Number((await OptionGroupRow.max('position', { where: { siteId }, transaction })) ?? -1) + 1;
     await OptionGroupRow.create({ id, siteId, name: input.name, min: input.min, max: input.max, position }, { transaction });
     await writeOptions(transaction, siteId, id, input.options);
-    await recordChange(transaction, { siteId, personId: actor.person.id, action: 'option-group.added', subjectKind: 'option group', subjectId: id, summary: `Options ${input.name} added` });
+    await recordChange(transaction, { siteId, personId: actor.person.id, action: 'option-group.added', subjectKind: 'option-group', subjectId: id, summary: `Options ${input.name} added` });
     return { id, version: 1 };
   });
 
@@ -45,7 +45,7 @@ export const updateOptionGroup = (actor: Actor, id: string, version: number, inp
     const { siteId } = actor;
     const row = await updateVersioned(OptionGroupRow, { siteId, id, version }, { name: input.name, min: input.min, max: input.max }, transaction);
     await writeOptions(transaction, siteId, id, input.options);
-    await recordChange(transaction, { siteId, personId: actor.person.id, action: 'option-group.updated', subjectKind: 'option group', subjectId: id, summary: `Options ${input.name} changed`, after: input });
+    await recordChange(transaction, { siteId, personId: actor.person.id, action: 'option-group.updated', subjectKind: 'option-group', subjectId: id, summary: `Options ${input.name} changed`, after: input });
     return { id, version: row.version };
   });
 
@@ -55,6 +55,6 @@ export const deleteOptionGroup = (actor: Actor, id: string, version: number): Pr
     const used = await ItemOptionGroupRow.count({ where: { siteId, optionGroupId: id }, transaction });
     if (used > 0) throw new AppError('conflict', `${used === 1 ? 'An item comes' : `${used} items come`} with these options. Nothing was deleted. Take the group off ${used === 1 ? 'it' : 'them'} first.`);
     const row = await deleteVersioned(OptionGroupRow, { siteId, id, version }, transaction);
-    await recordChange(transaction, { siteId, personId: actor.person.id, action: 'option-group.deleted', subjectKind: 'option group', subjectId: id, summary: `Options ${row.name} deleted` });
+    await recordChange(transaction, { siteId, personId: actor.person.id, action: 'option-group.deleted', subjectKind: 'option-group', subjectId: id, summary: `Options ${row.name} deleted` });
     return { id };
   });
