@@ -18,7 +18,7 @@ export function DeviceTable({ caption, columns, rows }: DeviceTableProps) {
   return (
     <table className={styles['table']}>
       <caption className="sr-only">{caption}</caption>
-      <thead><tr>{columns.map((column) => <th key={column} scope="col">{column}</th>)}</tr></thead>
+      <thead><tr>{columns.map((column) => (column === '' ? <td key={column} /> : <th key={column} scope="col">{column}</th>))}</tr></thead>
       {rows.map((row) => (
         <tbody key={row.id}>
           <tr>

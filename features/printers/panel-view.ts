@@ -27,6 +27,7 @@ export type PanelView = {
   readonly dependents: Dependents;
   readonly mayWrite: boolean;
   readonly mayMarkDown: boolean;
+  readonly maySetBackup: boolean;
   readonly mayTest: boolean;
 };
 
@@ -48,6 +49,7 @@ export const panelView = (site: Site, membership: Membership, printer: Printer |
   tests: printer === null ? [] : testsOf(site, printer),
   dependents: printer === null ? { obstacles: [], consequences: [] } : dependentsOfPrinter(site, printer.id),
   mayWrite: may(membership, 'printer.write'),
+  maySetBackup: may(membership, 'printer.set-backup'),
   mayMarkDown: may(membership, 'printer.mark-down'),
   mayTest: may(membership, 'printer.test'),
 });

@@ -43,3 +43,6 @@ export type PrinterDownInput = z.infer<typeof printerDownInput>;
 /** A test that a person saw come out of a printer, sent from a till. */
 export const printedTestInput = z.object({ till: id, printed: z.boolean() });
 export type PrintedTestInput = z.infer<typeof printedTestInput>;
+
+/** Which printer takes over; null for none. */
+export const backupInput = z.object({ backup: idOrNone });

@@ -16,3 +16,5 @@ export const takePrinterOff = (siteId: string, printer: string, version: number)
 export const markDown = (siteId: string, printer: string, input: PrinterDownInput): Promise<unknown> => send('PUT', `${printerUrl(siteId, printer)}/down`, { body: input });
 
 export const notePrintedTest = (siteId: string, printer: string, input: PrintedTestInput): Promise<unknown> => send('POST', `${printerUrl(siteId, printer)}/tests`, { body: input });
+
+export const sendBackup = (siteId: string, printer: string, backup: string | null): Promise<unknown> => send('PUT', `${printerUrl(siteId, printer)}/backup`, { body: { backup } });

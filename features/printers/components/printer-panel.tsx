@@ -12,6 +12,7 @@ import { printerFacts } from '@/lib/domain/devices/printer-differences';
 import { ProblemError } from '@/lib/http/client';
 import { takePrinterOff } from '../api/printers';
 import type { PanelView } from '../panel-view';
+import { BackupChoice } from './backup-choice';
 import { PrinterDown } from './printer-down';
 import { PrinterFormFields } from './printer-form';
 import { PrinterTests } from './printer-tests';
@@ -79,6 +80,7 @@ export function PrinterPanel({ view }: { readonly view: PanelView }) {
         {printer === null ? null : (
           <>
             <PrinterTests view={view} printer={printer.id} changed={refresh} />
+            {view.maySetBackup && !view.mayWrite ? <BackupChoice siteId={view.siteId} printer={printer} others={view.site.printers.filter((one) => one.id !== printer.id)} changed={refresh} /> : null}
             {view.mayMarkDown ? (
               <PrinterDown siteId={view.siteId} timeZone={view.timeZone} printer={printer} changed={refresh} backup={view.site.printers.find((one) => one.id === printer.backup)?.name ?? null} />
             ) : null}

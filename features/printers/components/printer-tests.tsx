@@ -21,7 +21,11 @@ export function PrinterTests({ view, printer, changed }: TestsProps) {
   const [busy, startTransition] = useTransition();
   const place = useRef<HTMLDivElement>(null);
   useEffect(() => {
-    if (window.location.hash === '#tests') place.current?.scrollIntoView();
+    // The panel around it is shown after its parts are in place.
+    const shown = requestAnimationFrame(() => {
+      if (window.location.hash === '#tests') place.current?.scrollIntoView();
+    });
+    return () => cancelAnimationFrame(shown);
   }, []);
   const note = (till: string, printed: boolean): void => startTransition(async () => {
     try {

@@ -39,7 +39,7 @@ function OneArea({ siteId, area }: { readonly siteId: string; readonly area: Are
   return (
     <li className="grid gap-2 rounded-md border border-line bg-raised p-3">
       <form onSubmit={submit} className="flex flex-wrap items-end gap-2">
-        <div className="min-w-40 flex-1"><TextField id={`area-${area.id}`} label={`${area.tills} ${area.tills === 1 ? 'till stands' : 'tills stand'} in`} value={name} onChange={(event) => setName(event.target.value)} /></div>
+        <div className="min-w-40 flex-1"><TextField id={`area-${area.id}`} label={`Name of ${area.name}`} hint={`${area.tills} ${area.tills === 1 ? 'till stands' : 'tills stand'} in it.`} value={name} onChange={(event) => setName(event.target.value)} /></div>
         <Button type="submit" disabled={busy || name.trim() === '' || name.trim() === area.name}>Rename</Button>
       </form>
       <TakeOffList name={area.name} busy={busy} takeOff={() => run(() => takeAreaOff(siteId, area.id, area.version))} {...area.dependents} />
