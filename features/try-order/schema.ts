@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import type { Order } from '@/lib/domain/orders/order';
 import { asId } from '@/lib/domain/site/ids';
-import type { AreaId, CourseId, ItemId, OptionId, PlanId, TillId } from '@/lib/domain/site/ids';
+import type { AreaId, CourseId, ItemId, OptionId, TillId } from '@/lib/domain/site/ids';
 import { orderTypes } from '@/lib/domain/site/order-types';
 
 const id = <Id extends string>() => z.string().max(64).transform((value) => asId<Id>(value));
@@ -35,9 +35,9 @@ export const presentChoices = ['planned', 'now'] as const;
 /** Every station open and every printer up, or the kitchen as it is at this moment. */
 export type PresentChoice = (typeof presentChoices)[number];
 
-/** What a person has written, kept in the browser until they clear it. */
-export const draftSchema = z.object({ plan: id<PlanId>(), present: z.enum(presentChoices), order: orderSchema });
-export type Draft = { readonly plan: PlanId; readonly present: PresentChoice; readonly order: Order };
+/** What a person has written (the plan by the key of its choice), kept in the browser until they clear it. */
+export const draftSchema = z.object({ plan: z.string().max(64), present: z.enum(presentChoices), order: orderSchema });
+export type Draft = { readonly plan: string; readonly present: PresentChoice; readonly order: Order };
 
 export const tryOrderInput = draftSchema.extend({ time: z.string().regex(/^([01]\d|2[0-3]):[0-5]\d$/) });
 export type TryOrderInput = Draft & { readonly time: string };

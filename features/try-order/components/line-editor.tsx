@@ -66,7 +66,7 @@ export function LineEditor({ site, order, line, index, setOrder, onRemoved }: Ed
         <label className={styles['field']}>
           <span>Course</span>
           <select value={line.course ?? ''} onChange={(event) => onChange({ course: event.target.value === '' ? null : asId(event.target.value) })}>
-            <option value="">{own === undefined ? 'None' : `${own.name}, its own`}</option>
+            <option value="">{own === undefined ? 'None' : own.name}</option>
             {site.courses.filter(({ id }) => id !== own?.id).map(({ id, name }) => <option key={id} value={id}>{name}</option>)}
           </select>
         </label>

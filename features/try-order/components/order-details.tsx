@@ -3,30 +3,26 @@
 import { fromTill } from '@/lib/domain/orders/edit-order';
 import type { Order } from '@/lib/domain/orders/order';
 import { asId } from '@/lib/domain/site/ids';
-import type { PlanId, TillId } from '@/lib/domain/site/ids';
+import type { TillId } from '@/lib/domain/site/ids';
 import { orderTypeWords, type OrderType } from '@/lib/domain/site/order-types';
 import type { Site } from '@/lib/domain/site/site';
+import type { PlanChoice } from '../plan-choices';
 import type { Draft } from '../schema';
 import styles from './try-order.module.css';
 import type { DraftControl } from './use-draft';
 
-const planWords = (site: Site, plan: Site['plans'][number]): string => {
-  if (site.live?.planId !== plan.id) return `${plan.name}, not live`;
-  return site.live.version === plan.version ? `${plan.name}, live` : `${plan.name} as edited, not live yet`;
-};
-
 const firstLetterLarge = (words: string): string => words.slice(0, 1).toUpperCase() + words.slice(1);
 
-type DetailsProps = { readonly site: Site; readonly draft: Draft } & Pick<DraftControl, 'change' | 'setOrder'>;
+type DetailsProps = { readonly site: Site; readonly choices: readonly PlanChoice[]; readonly draft: Draft } & Pick<DraftControl, 'change' | 'setOrder'>;
 
-function Under({ site, draft, change }: Omit<DetailsProps, 'setOrder'>) {
+function Under({ choices, draft, change }: Omit<DetailsProps, 'setOrder' | 'site'>) {
   const states = [['planned', 'As planned'], ['now', 'As it is now']] as const;
   return (
     <>
       <label className={styles['field']}>
         <span>Plan</span>
-        <select value={draft.plan} onChange={(event) => change({ plan: asId<PlanId>(event.target.value) })}>
-          {site.plans.map((plan) => <option key={plan.id} value={plan.id}>{planWords(site, plan)}</option>)}
+        <select value={draft.plan} onChange={(event) => change({ plan: event.target.value })}>
+          {choices.map(({ key, words }) => <option key={key} value={key}>{words}</option>)}
         </select>
       </label>
       <fieldset className={styles['choice']}>
@@ -104,10 +100,10 @@ function ForWhom({ order, setOrder }: Omit<OrderPart, 'site'>) {
 }
 
 /** Under which plan and state of the kitchen, from which till, for whom: one strip above the order. */
-export function OrderDetails({ site, draft, change, setOrder }: DetailsProps) {
+export function OrderDetails({ site, choices, draft, change, setOrder }: DetailsProps) {
   return (
     <section className={styles['strip']} aria-label="Where the order comes from">
-      <Under site={site} draft={draft} change={change} />
+      <Under choices={choices} draft={draft} change={change} />
       <FromWhere site={site} order={draft.order} setOrder={setOrder} />
       <ForWhom order={draft.order} setOrder={setOrder} />
     </section>

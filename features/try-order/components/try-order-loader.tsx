@@ -1,6 +1,7 @@
 'use client';
 
 import dynamic from 'next/dynamic';
+import type { Plan } from '@/lib/domain/site/plan';
 import type { Site } from '@/lib/domain/site/site';
 import styles from './try-order.module.css';
 
@@ -10,6 +11,6 @@ const TryOrder = dynamic(() => import('./try-order').then((loaded) => loaded.Try
   loading: () => <p className={styles['loading']} role="status">Laying out the order pad</p>,
 });
 
-export function TryOrderLoader({ site }: { readonly site: Site }) {
-  return <TryOrder site={site} />;
+export function TryOrderLoader(props: { readonly site: Site; readonly livePlan: Plan | null }) {
+  return <TryOrder {...props} />;
 }

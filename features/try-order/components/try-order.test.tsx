@@ -45,7 +45,7 @@ afterEach(() => {
 
 describe('trying an order', () => {
   it('shows paper at one press of a ready order', () => {
-    render(<TryOrder site={site} />);
+    render(<TryOrder site={site} livePlan={null} />);
     fireEvent.click(screen.getByRole('button', { name: /House burger with side salad/ }));
     expect(screen.getByRole('heading', { name: 'Everything prints: 2 tickets from 2 printers' })).toBeTruthy();
     expect(ticketFor('Grill')).toContain('1 HOUSE BURGER');
@@ -54,28 +54,28 @@ describe('trying an order', () => {
   });
 
   it('adds three at one typing, by the keyboard alone', () => {
-    render(<TryOrder site={site} />);
+    render(<TryOrder site={site} livePlan={null} />);
     add('3 crab');
     expect(ticketFor('Larder')).toContain('3 CRAB TOAST');
   });
 
   it('keeps what was written over a reload', () => {
-    const { unmount } = render(<TryOrder site={site} />);
+    const { unmount } = render(<TryOrder site={site} livePlan={null} />);
     add('crab');
     fireEvent.change(screen.getByLabelText('Table'), { target: { value: '27' } });
     unmount();
-    render(<TryOrder site={site} />);
+    render(<TryOrder site={site} livePlan={null} />);
     expect(ticketFor('Larder')).toMatch(/TABLE 27.*1 CRAB TOAST/);
   });
 
   it('begins afresh when what the browser kept cannot be read', () => {
     sessionStorage.setItem(`tamis.try.${site.id}`, '{"plan":7}');
-    render(<TryOrder site={site} />);
+    render(<TryOrder site={site} livePlan={null} />);
     expect(screen.getByRole('heading', { name: 'Take a ready order, or add the first item' })).toBeTruthy();
   });
 
   it('says what is lost as the kitchen is now, and why', () => {
-    render(<TryOrder site={site} />);
+    render(<TryOrder site={site} livePlan={null} />);
     add('flan');
     expect(screen.getByRole('heading', { name: /^Everything prints/ })).toBeTruthy();
     fireEvent.click(screen.getByRole('radio', { name: 'As it is now' }));
@@ -84,7 +84,7 @@ describe('trying an order', () => {
   });
 
   it('explains the line that is pressed on its ticket', () => {
-    render(<TryOrder site={site} />);
+    render(<TryOrder site={site} livePlan={null} />);
     fireEvent.click(screen.getByRole('button', { name: /House burger with side salad/ }));
     fireEvent.click(screen.getByRole('button', { name: '1 SIDE SALAD' }));
     const why = screen.getByRole('complementary', { name: 'Why it prints there' });
@@ -93,7 +93,7 @@ describe('trying an order', () => {
   });
 
   it('offers a note that looks like an allergy as one, and prints it', () => {
-    render(<TryOrder site={site} />);
+    render(<TryOrder site={site} livePlan={null} />);
     add('burger');
     fireEvent.change(screen.getByLabelText('For'), { target: { value: '2' } });
     fireEvent.change(screen.getByLabelText('Note'), { target: { value: 'no walnuts' } });
@@ -103,7 +103,7 @@ describe('trying an order', () => {
   });
 
   it('says on the line that it is sold out, and prints the rest', () => {
-    render(<TryOrder site={site} />);
+    render(<TryOrder site={site} livePlan={null} />);
     add('crab');
     add('steak');
     expect(screen.getByRole('heading', { name: '1 line is refused, the rest prints: 1 ticket from 1 printer' })).toBeTruthy();
@@ -111,17 +111,25 @@ describe('trying an order', () => {
   });
 
   it('brings back the order that a ready one replaced', () => {
-    render(<TryOrder site={site} />);
+    render(<TryOrder site={site} livePlan={null} />);
     add('3 crab');
     fireEvent.click(screen.getByRole('button', { name: 'Clear the order' }));
     fireEvent.click(screen.getByRole('button', { name: 'Bring back the earlier order' }));
     expect(ticketFor('Larder')).toContain('3 CRAB TOAST');
   });
 
+  it('tries the live plan first, and the edited one when asked', () => {
+    render(<TryOrder site={site} livePlan={{ ...site.plans[0]!, version: 0, rules: [] }} />);
+    add('crab');
+    expect(screen.getByRole('heading', { name: '1 line would print nowhere' })).toBeTruthy();
+    fireEvent.change(screen.getByLabelText('Plan'), { target: { value: site.plans[0]!.id } });
+    expect(screen.getByRole('heading', { name: /^Everything prints/ })).toBeTruthy();
+  });
+
   it('says what is missing on a site without tills or plans', () => {
-    const { rerender } = render(<TryOrder site={{ ...site, tills: [] }} />);
+    const { rerender } = render(<TryOrder site={{ ...site, tills: [] }} livePlan={null} />);
     expect(screen.getByText('This site has no till to order from. Add one first.')).toBeTruthy();
-    rerender(<TryOrder key="other" site={{ ...site, plans: [] }} />);
+    rerender(<TryOrder key="other" site={{ ...site, plans: [] }} livePlan={null} />);
     expect(screen.getByText('This site has no plan yet. Make one on the board first.')).toBeTruthy();
   });
 });

@@ -6,6 +6,7 @@ import { tryOrder } from '@/lib/domain/orders/try-order';
 import type { Plan } from '@/lib/domain/site/plan';
 import { allWell, presentOf } from '@/lib/domain/site/present';
 import type { Site } from '@/lib/domain/site/site';
+import { planChoices, planOfKey, type PlanChoice } from '../plan-choices';
 import type { Draft } from '../schema';
 import { OrderDetails } from './order-details';
 import { OrderPad } from './order-pad';
@@ -14,9 +15,9 @@ import { timeOn } from './time-on';
 import styles from './try-order.module.css';
 import { useDraft, type DraftControl } from './use-draft';
 
-type TryProps = { readonly site: Site; readonly plan: Plan; readonly draft: Draft; readonly control: DraftControl };
+type TryProps = { readonly site: Site; readonly choices: readonly PlanChoice[]; readonly plan: Plan; readonly draft: Draft; readonly control: DraftControl };
 
-function Trying({ site, plan, draft, control: { change, ...control } }: TryProps) {
+function Trying({ site, choices, plan, draft, control: { change, ...control } }: TryProps) {
   const { order } = draft;
   const [selected, setSelected] = useState<number | null>(null);
   const [openedAt] = useState(() => timeOn(site.timeZone, new Date()));
@@ -28,7 +29,7 @@ function Trying({ site, plan, draft, control: { change, ...control } }: TryProps
   const shared = { site, plan, order, tried, ready, selected, onSelect: setSelected };
   return (
     <>
-      <OrderDetails site={site} draft={draft} change={change} setOrder={control.setOrder} />
+      <OrderDetails site={site} choices={choices} draft={draft} change={change} setOrder={control.setOrder} />
       <div className={`${styles['lane'] ?? ''} ${order.lines.length === 0 ? (styles['emptyLane'] ?? '') : ''}`}>
         <OrderPad {...shared} {...control} />
         <Outcome {...shared} onTake={control.replaceOrder} />
@@ -38,11 +39,12 @@ function Trying({ site, plan, draft, control: { change, ...control } }: TryProps
 }
 
 /** Write an order, see its paper and the reasons. Everything is computed here, by the engine that proves plans. */
-export function TryOrder({ site }: { readonly site: Site }) {
-  const control = useDraft(site);
+export function TryOrder({ site, livePlan }: { readonly site: Site; readonly livePlan: Plan | null }) {
+  const choices = useMemo(() => planChoices(site, livePlan), [site, livePlan]);
+  const control = useDraft(site, choices);
   const { draft } = control;
-  const plan = site.plans.find(({ id }) => id === draft?.plan);
+  const plan = draft === null ? null : planOfKey(choices, draft.plan);
   if (site.tills.length === 0) return <p className={styles['loading']}>This site has no till to order from. Add one first.</p>;
-  if (draft === null || plan === undefined) return <p className={styles['loading']}>This site has no plan yet. Make one on the board first.</p>;
-  return <Trying site={site} plan={plan} draft={draft} control={control} />;
+  if (draft === null || plan === null) return <p className={styles['loading']}>This site has no plan yet. Make one on the board first.</p>;
+  return <Trying site={site} choices={choices} plan={plan} draft={draft} control={control} />;
 }

@@ -4,20 +4,21 @@ import { useEffect, useState } from 'react';
 import { emptyOrder } from '@/lib/domain/orders/edit-order';
 import type { Order } from '@/lib/domain/orders/order';
 import type { Site } from '@/lib/domain/site/site';
+import { planOfKey, type PlanChoice } from '../plan-choices';
 import { draftSchema, type Draft } from '../schema';
 
 const keyOf = (site: Site): string => `tamis.try.${site.id}`;
 
-const freshDraft = (site: Site): Draft | null => {
-  const plan = site.live?.planId ?? site.plans[0]?.id;
-  return plan === undefined ? null : { plan, present: 'planned', order: emptyOrder(site) };
+const freshDraft = (site: Site, choices: readonly PlanChoice[]): Draft | null => {
+  const [first] = choices;
+  return first === undefined ? null : { plan: first.key, present: 'planned', order: emptyOrder(site) };
 };
 
 /** What this browser kept, if it still reads as a draft of a plan and a till that exist. */
-const keptDraft = (site: Site): Draft | null => {
+const keptDraft = (site: Site, choices: readonly PlanChoice[]): Draft | null => {
   try {
     const kept = draftSchema.safeParse(JSON.parse(sessionStorage.getItem(keyOf(site)) ?? 'null'));
-    const stands = kept.success && site.plans.some(({ id }) => id === kept.data.plan) && site.tills.some(({ id }) => id === kept.data.order.till);
+    const stands = kept.success && planOfKey(choices, kept.data.plan) !== null && site.tills.some(({ id }) => id === kept.data.order.till);
     return stands ? kept.data : null;
   } catch {
     return null;
@@ -25,8 +26,8 @@ const keptDraft = (site: Site): Draft | null => {
 };
 
 /** The order being written: kept over a reload, and the one before it can be brought back. */
-export const useDraft = (site: Site) => {
-  const [draft, setDraft] = useState<Draft | null>(() => keptDraft(site) ?? freshDraft(site));
+export const useDraft = (site: Site, choices: readonly PlanChoice[]) => {
+  const [draft, setDraft] = useState<Draft | null>(() => keptDraft(site, choices) ?? freshDraft(site, choices));
   const [before, setBefore] = useState<Order | null>(null);
   useEffect(() => {
     if (draft === null) return;

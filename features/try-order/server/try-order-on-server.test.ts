@@ -5,11 +5,13 @@ import { asId } from '@/lib/domain/site/ids';
 import { allWell, presentOf } from '@/lib/domain/site/present';
 import type { Actor } from '@/lib/server/actor';
 import { anItem, aPlan, aPrinter, aRule, aSection, aSite, aStation, aTill } from '@/tests/fixtures/build-site';
+import { liveKey } from '../plan-choices';
 import { presentChoices, tryOrderInput } from '../schema';
 import { tryOrderOnServer } from './try-order-on-server';
 
-const { loadSite } = vi.hoisted(() => ({ loadSite: vi.fn() }));
+const { loadSite, readPlanVersion } = vi.hoisted(() => ({ loadSite: vi.fn(), readPlanVersion: vi.fn() }));
 vi.mock('@/lib/server/site-snapshot', () => ({ loadSite }));
+vi.mock('@/lib/server/plan-store', () => ({ readPlanVersion }));
 vi.mock('@/lib/server/database', () => ({}));
 
 const site = aSite({
@@ -43,9 +45,18 @@ describe('an order tried on the server', () => {
     expect(await outcomes('now')).toEqual(['prints', 'lost']);
   });
 
+  it('goes by the version that is live, not by what has been edited since', async () => {
+    loadSite.mockResolvedValue({ ...site, live: { planId: plan.id, version: 0, since: '', inForceOn: [] } });
+    readPlanVersion.mockResolvedValue({ offers: null, rules: [] });
+    const { order } = readyOrders(site, plan)[0]!;
+    const live = await tryOrderOnServer({ ...actor, plan: liveKey, present: 'planned', order, time: '19:42' });
+    expect(readPlanVersion).toHaveBeenCalledWith(site.id, plan.id, 0);
+    expect(new Set(live.lines.map(({ outcome }) => outcome))).toEqual(new Set(['lost']));
+  });
+
   it('is refused in words when its plan has gone', async () => {
     const { order } = readyOrders(site, plan)[0]!;
-    await expect(tryOrderOnServer({ ...actor, plan: asId('gone'), present: 'planned', order, time: '19:42' })).rejects.toThrow('This plan is not there any more');
+    await expect(tryOrderOnServer({ ...actor, plan: 'gone', present: 'planned', order, time: '19:42' })).rejects.toThrow('This plan is not there any more');
   });
 
   it.each([['a time that is none', { time: '25:00' }], ['an unknown order type', { order: { orderType: 'by pigeon' } }]])('does not take %s', (_, fault) => {
