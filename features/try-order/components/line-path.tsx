@@ -29,10 +29,10 @@ export function LinePath({ route, site }: { readonly route: LineRoute; readonly 
         return (
           <li key={key} className={printer === null ? styles['broken'] : copy ? styles['copyLeg'] : undefined}>
             <span>{what}</span>
-            <i aria-hidden="true" />
+            <i className={styles['wire']} aria-hidden="true" />
             {station === undefined ? null : <Stamp code={station.code} mesh={station.mesh} colour={station.colour} size="small" />}
             <span>{station?.name ?? 'Unknown station'}</span>
-            <i aria-hidden="true" />
+            <i className={styles['wire']} aria-hidden="true" />
             {printer === null ? <b>{reached === null ? 'closed' : 'no printer'}</b> : <code>{names.printer(printer)}</code>}
           </li>
         );
