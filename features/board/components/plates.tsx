@@ -13,12 +13,13 @@ function OnePlate({ plate, first, canFix }: { readonly plate: Plate; readonly fi
         <Tag tone={plate.tag.tone}>{plate.tag.words}</Tag>
       </p>
       {first ? <p className={styles['plateWhere']}>{plate.where}</p> : null}
-      {plate.wrong === null ? <p className={styles['plateQuiet']}>{first ? plate.quiet : 'if the one above is out'}</p> : (
+      {plate.wrong === null ? <p className={styles['plateQuiet']}>{plate.quiet}</p> : (
         <p className={styles['plateWrong']}>
           {plate.wrong.words}{' '}
           {mend !== null && canFix ? (
             <button type="button" className={styles['plateFix']} onClick={() => fix.apply(mend)}>{mend.label}</button>
           ) : null}
+          {mend?.kind === 'rename-printer' && !canFix ? `Use ${mend.name}.` : null}
         </p>
       )}
     </div>

@@ -4,6 +4,7 @@ import type { Fix } from '@/lib/domain/findings/finding';
 import { fixPermissions, mayFix } from '@/lib/domain/findings/fix-permissions';
 import { boardSiteOf } from '@/lib/domain/plans/board-site';
 import { platesOf, standInWords } from '@/lib/domain/plans/plates';
+import { compileReach } from '@/lib/domain/reach/compile-reach';
 import { summarise } from '@/lib/domain/proof/summarise';
 import { may } from '@/lib/domain/roles/permissions';
 import type { Plan, PlanContent } from '@/lib/domain/site/plan';
@@ -24,6 +25,7 @@ export const planToShow = (site: Site, asked: string | undefined): Plan | null =
 /** Everything that the board of one plan is drawn from, with its proof. */
 export const viewBoard = async ({ site, membership }: Pick<OpenSite, 'site' | 'membership'>, plan: Plan): Promise<BoardView> => {
   const findings = checkSite(site, plan);
+  const ask = compileReach(site);
   const kinds = Object.keys(fixPermissions) as Fix['kind'][];
   return {
     siteId: site.id,
@@ -34,7 +36,7 @@ export const viewBoard = async ({ site, membership }: Pick<OpenSite, 'site' | 'm
     site: boardSiteOf(site),
     stations: site.stations.map((station) => ({
       id: station.id, name: station.name, code: station.code, kind: station.kind, mesh: station.mesh, colour: station.colour,
-      standIn: standInWords(station, site), plates: platesOf(site, station, findings),
+      standIn: standInWords(station, site), plates: platesOf(site, station, findings, ask),
     })),
     content: { offers: plan.offers, rules: plan.rules },
     liveContent: await liveContentOf(site, plan),

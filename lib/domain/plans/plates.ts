@@ -1,8 +1,10 @@
 import type { Finding, Fix } from '../findings/finding';
+import type { AskReach } from '../reach/compile-reach';
 import type { PrinterId, StationId } from '../site/ids';
 import type { Printer } from '../site/printer';
 import type { Site } from '../site/site';
 import type { Station } from '../site/station';
+import type { Till } from '../site/till';
 import { listWords } from './words';
 
 export type PlateTag = { readonly words: string; readonly tone: 'calm' | 'look' | 'hot' };
@@ -54,25 +56,58 @@ const wrongOf = (printer: Printer, findings: readonly Finding[]): Finding | unde
   findings
     .filter((finding) => finding.subject.kind === 'printer' && finding.subject.id === printer.id && finding.subject.field !== undefined && finding.severity === 'stop')[0];
 
-const plateOf = (printer: Printer, site: Site, findings: readonly Finding[]): Plate => {
+const plateOf = (printer: Printer, site: Site, quiet: string, findings: readonly Finding[]): Plate => {
   const wrong = wrongOf(printer, findings);
   return {
     printer: printer.id,
     name: printer.name,
     where: whereOf(printer, site),
     tag: tagOf(printer, wrong),
-    quiet: quietOf(printer, site),
+    quiet,
     wrong: wrong === undefined ? null : { words: wrong.title, fix: wrong.fixes[0] ?? null },
     version: printer.version,
   };
 };
 
-/** The plates of one station, in the order its printers are tried. */
-export const platesOf = (site: Site, station: Station, findings: readonly Finding[]): readonly Plate[] =>
-  station.printers.flatMap((id) => {
-    const printer = site.printers.find((candidate) => candidate.id === id);
-    return printer === undefined ? [] : [plateOf(printer, site, findings)];
+/** For each till, the first of the station's printers that it reaches: where its tickets come out when all is well. */
+const firstPrinters = (site: Site, station: Station, ask: AskReach): ReadonlyMap<PrinterId, readonly Till[]> => {
+  const byPrinter = new Map<PrinterId, Till[]>();
+  for (const till of site.tills) {
+    const first = station.printers.find((printer) => ask(till.id, printer).reaches);
+    if (first !== undefined) byPrinter.set(first, [...(byPrinter.get(first) ?? []), till]);
+  }
+  return byPrinter;
+};
+
+/** "Terrace" when every till of the area is among them, else the tills' own names. */
+const sayTills = (site: Site, tills: readonly Till[]): string => {
+  const whole = site.areas.filter((area) => {
+    const inArea = site.tills.filter((till) => till.area === area.id);
+    return inArea.length > 0 && inArea.every((till) => tills.includes(till));
   });
+  const rest = tills.filter((till) => !whole.some((area) => area.id === till.area));
+  return listWords([...whole.map((area) => area.name), ...rest.map((till) => till.name)]);
+};
+
+/**
+ * The plates of one station: the printer that most tills print on, then the others in the order they are tried, each
+ * saying whose tickets come out there first.
+ */
+export const platesOf = (site: Site, station: Station, findings: readonly Finding[], ask: AskReach): readonly Plate[] => {
+  const firsts = firstPrinters(site, station, ask);
+  const count = (printer: PrinterId): number => firsts.get(printer)?.length ?? 0;
+  const printers = station.printers.flatMap((id) => site.printers.filter((printer) => printer.id === id));
+  const [main] = printers.toSorted((left, right) => count(right.id) - count(left.id));
+  if (main === undefined) return [];
+  const others = printers.filter((printer) => printer !== main);
+  return [
+    plateOf(main, site, quietOf(main, site), findings),
+    ...others.map((printer) => {
+      const first = sayTills(site, firsts.get(printer.id) ?? []);
+      return plateOf(printer, site, first === '' ? `Only when ${main.name} is out` : `First for ${first}`, findings);
+    }),
+  ];
+};
 
 /** "Stand-in Sauce", "No stand-in"; a station that is closed says so first. */
 export const standInWords = (station: Station, site: Site): string => {
