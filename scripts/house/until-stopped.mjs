@@ -28,6 +28,11 @@ export function runUntilStopped(work, { codeWhenAsked }) {
       void stop(codeWhenAsked);
     });
 
+  whenNpmIsGone(() => {
+    say('\nStopping, because npm was stopped.');
+    void stop(codeWhenAsked);
+  });
+
   function fail(sentence) {
     if (isStopping) return;
     process.stderr.write(`\n${sentence}\n`);
@@ -38,6 +43,18 @@ export function runUntilStopped(work, { codeWhenAsked }) {
     (code) => (code === undefined ? undefined : stop(code)),
     (error) => fail(sentenceOf(error, homeAt(root).folder) ?? error?.stack ?? String(error)),
   );
+}
+
+/** Whoever ends npm means this process too, but npm's shell does not always pass the word on: an orphan notices by its parent. */
+function whenNpmIsGone(act) {
+  if (process.env.npm_lifecycle_event === undefined) return;
+  const parent = process.ppid;
+  const watch = setInterval(() => {
+    if (process.ppid === parent) return;
+    clearInterval(watch);
+    act();
+  }, 250);
+  watch.unref();
 }
 
 async function undoOne(step) {
