@@ -21,8 +21,8 @@ export function TopBar({ site, live, person, back, manySites }: TopBarProps) {
   return (
     <div className="flex min-h-[54px] flex-wrap items-center gap-x-4 gap-y-1 bg-night px-4 py-2 text-[13.5px] text-on-night md:px-[22px]">
       <Link href="/sites" className="flex items-center gap-[9px] text-[20px] font-[650] tracking-[-0.01em] font-stretch-[118%]"><MeshMark /> Tamis</Link>
-      {site === undefined ? null : <p className="border-l border-line-on-night pl-4 text-quiet-on-night"><b className="text-on-night">{site.name}</b>{site.place === '' ? '' : `, ${site.place}`}</p>}
-      <div className="flex-1" />
+      {site === undefined ? null : <p className="min-w-0 flex-1 truncate border-l border-line-on-night pl-3 text-quiet-on-night sm:flex-none sm:pl-4"><b className="text-on-night">{site.name}</b><span className="hidden sm:inline">{site.place === '' ? '' : `, ${site.place}`}</span></p>}
+      <div className="hidden flex-1 sm:block" />
       {live === undefined ? null : (
         <p className="order-last w-full text-quiet-on-night sm:order-none sm:w-auto">
           <i aria-hidden className={`mr-2 inline-block size-2 rounded-full ${live === null ? 'bg-quiet' : live.everywhere ? 'bg-[#7cc79c]' : 'bg-[#e3b75a]'}`} />
@@ -31,7 +31,7 @@ export function TopBar({ site, live, person, back, manySites }: TopBarProps) {
       )}
       <details name="person" className="group relative sm:border-l sm:border-line-on-night sm:pl-4">
         <summary className="flex min-h-9 list-none items-center gap-1.5 text-quiet-on-night [&::-webkit-details-marker]:hidden">
-          <span><b className="text-on-night">{person.name}</b><span className="hidden sm:inline">{person.title === '' ? '' : `, ${person.title}`}</span></span>
+          <span><b className="text-on-night"><span className="hidden sm:inline">{person.name}</span><span className="sm:hidden">{person.name.split(' ')[0]}</span></b><span className="hidden sm:inline">{person.title === '' ? '' : `, ${person.title}`}</span></span>
           <svg width="10" height="6" viewBox="0 0 10 6" aria-hidden><path d="M1 1l4 4 4-4" fill="none" stroke="currentColor" strokeWidth="1.5" /></svg>
         </summary>
         <div className="absolute right-0 z-40 mt-1 w-56 rounded-lg border border-line bg-raised p-1.5 text-ink shadow-xl">
