@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import type { AreaId, ItemId, OptionId, PlanId, RuleId, SectionId, StationId, TillId } from '@/lib/domain/site/ids';
 import { orderTypes } from '@/lib/domain/site/order-types';
-import type { PlanContent } from '@/lib/domain/site/plan';
+import type { PlanContent, WeeklyTime } from '@/lib/domain/site/plan';
 
 const id = <Id extends string>() => z.string().regex(/^[A-Za-z0-9._-]{1,36}$/, 'This is not an id.').transform((value) => value as Id);
 
@@ -63,6 +63,6 @@ const weeklyTime = z.strictObject({
 
 export const weeklyTimesBody = z.strictObject({ weeklyTimes: z.array(weeklyTime).max(200), was: z.array(weeklyTime).max(200) });
 
-export type NewPlan = z.infer<typeof newPlanBody>;
-export type RenamePlan = z.infer<typeof renamePlanBody>;
-export type WeeklyTimes = z.infer<typeof weeklyTimesBody>;
+export type NewPlan = { readonly name: string; readonly from: string | null };
+export type RenamePlan = { readonly name: string; readonly was: string };
+export type WeeklyTimes = { readonly weeklyTimes: readonly WeeklyTime[]; readonly was: readonly WeeklyTime[] };

@@ -38,10 +38,13 @@ export function BoardRoom({ site, content, version, proof, settings, children }:
   const [opened, setOpened] = useState<Opened>(null);
   const [opening] = useState(() => ({ open: setOpened, close: () => setOpened(null) }));
   const [painted, setPainted] = useState(false);
-  const grab: Grab = useRef(null);
-  const retry = useRef(() => undefined as void);
-  const [saver] = useState(() => ({ retry: () => retry.current() }));
-  useEffect(() => setPainted(true), []);
+  const grabRef: Grab = useRef(null);
+  const retryRef = useRef(() => undefined as void);
+  const [saver] = useState(() => ({ retry: () => retryRef.current() }));
+  useEffect(() => {
+    const timer = setTimeout(() => setPainted(true), 0);
+    return () => clearTimeout(timer);
+  }, []);
   useEffect(() => store.readSite(site), [store, site]);
   useEffect(() => store.set((state) => receiveReading(state, { content, version }, store.site)), [store, content, version]);
   return (
@@ -49,11 +52,11 @@ export function BoardRoom({ site, content, version, proof, settings, children }:
       <SettingsContext value={settings}>
         <SaverContext value={saver}>
         <OpenedContext value={opening}>
-          <BoardHands retry={retry} proof={proof} proven={content} />
+          <BoardHands retryRef={retryRef} proof={proof} proven={content} />
           {/* Presses bubble here from the cards, which are themselves buttons: nothing is hidden from the keyboard. */}
-          <div onMouseDown={(event) => grab.current?.(event)} onTouchStart={(event) => grab.current?.(event)}>{children}</div>
+          <div onMouseDown={(event) => grabRef.current?.(event)} onTouchStart={(event) => grabRef.current?.(event)}>{children}</div>
           <Said />
-          {painted && settings.mayWrite ? <DragLayer grab={grab} /> : null}
+          {painted && settings.mayWrite ? <DragLayer grabRef={grabRef} /> : null}
           {opened === null ? null : <OpenedLayer opened={opened} close={opening.close} />}
         </OpenedContext>
         </SaverContext>
@@ -62,11 +65,11 @@ export function BoardRoom({ site, content, version, proof, settings, children }:
   );
 }
 
-type BoardHandsProps = { readonly retry: RefObject<() => void>; readonly proof: ProofSummary; readonly proven: PlanContent };
+type BoardHandsProps = { readonly retryRef: RefObject<() => void>; readonly proof: ProofSummary; readonly proven: PlanContent };
 
 /** What works in the background: saving, who else is here, the proof, the keys for Undo. Draws nothing. */
-function BoardHands({ retry, proof, proven }: BoardHandsProps) {
-  useKeptEdits(retry);
+function BoardHands({ retryRef, proof, proven }: BoardHandsProps) {
+  useKeptEdits(retryRef);
   usePresence();
   useUndoKeys();
   useProof(proof, proven);

@@ -30,24 +30,24 @@ function DropZone({ place }: { readonly place: DropPlace }) {
  * One draggable for all cards: it takes the shape of whichever card is pressed. Hundreds of cards thus cost nothing
  * while one of them moves.
  */
-function Grabbed({ grab }: { readonly grab: Grab }) {
+function Grabbed({ grabRef }: { readonly grabRef: Grab }) {
   const { setNodeRef, listeners } = useDraggable({ id: 'grabbed', data: { card: '' } });
   useEffect(() => {
-    grab.current = (event) => {
+    grabRef.current = (event) => {
       const paper = event.target instanceof Element ? event.target.closest<HTMLElement>('[data-card]') : null;
       if (paper === null || (event.target as Element).closest('[data-no-drag]') !== null) return;
       setNodeRef(paper);
       listeners?.[event.type === 'touchstart' ? 'onTouchStart' : 'onMouseDown']?.(event);
     };
     return () => {
-      grab.current = null;
+      grabRef.current = null;
     };
-  }, [grab, listeners, setNodeRef]);
+  }, [grabRef, listeners, setNodeRef]);
   return null;
 }
 
 /** Drag by mouse and touch. Loaded after the first paint: the board is whole without it. */
-export default function DragLayer({ grab }: { readonly grab: Grab }) {
+export default function DragLayer({ grabRef }: { readonly grabRef: Grab }) {
   const store = useStore();
   const lifted = useBoard((state) => (state.lifted?.by === 'pointer' ? state.lifted : null));
   const pressed = useRef<string | null>(null);
@@ -85,7 +85,7 @@ export default function DragLayer({ grab }: { readonly grab: Grab }) {
       onDragCancel={() => store.set(cancelLift)}
     >
       {dropPlaces(store.site).map((place) => <DropZone key={place} place={place} />)}
-      <Grabbed grab={grab} />
+      <Grabbed grabRef={grabRef} />
       <DragOverlay dropAnimation={null} zIndex={40}>
         {lifted === null ? null : <LiftedPaper cards={lifted.cards} />}
       </DragOverlay>

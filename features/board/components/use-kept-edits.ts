@@ -24,9 +24,9 @@ const takeUpKept = (store: BoardStore, siteId: string, planId: string): void => 
 
 /**
  * Saves what is edited, keeps in the browser what could not be saved, and tries again once the connection is back.
- * `handle` is given the way to try at once.
+ * `retryRef` is given the way to try at once.
  */
-export const useKeptEdits = (handle: RefObject<() => void>): void => {
+export const useKeptEdits = (retryRef: RefObject<() => void>): void => {
   const store = useStore();
   const { siteId, planId, mayWrite } = useSettings();
   useEffect(() => {
@@ -41,11 +41,11 @@ export const useKeptEdits = (handle: RefObject<() => void>): void => {
       written = pending;
       keep(localStorage, siteId, planId, { version, edits: pending });
     });
-    handle.current = saver.retry;
+    retryRef.current = saver.retry;
     window.addEventListener('online', saver.retry);
     return () => {
       window.removeEventListener('online', saver.retry);
       saver.stop();
     };
-  }, [store, siteId, planId, mayWrite, handle]);
+  }, [store, siteId, planId, mayWrite, retryRef]);
 };

@@ -2,10 +2,11 @@ import 'server-only';
 import { AppError } from '@/lib/http/errors';
 import { actIn, type Actor } from '@/lib/server/actor';
 import { recordChange } from '@/lib/server/history';
-import { deleteVersioned, StaleWrite } from '@/lib/server/versioned-update';
+import { deleteVersioned, RowMissing, StaleWrite } from '@/lib/server/versioned-update';
 import { PlanRow } from '@/models/plan';
 import { SiteRow } from '@/models/site';
 import { WeeklyTimeRow } from '@/models/weekly-time';
+import { planMissing } from './read-plan';
 
 /** Deletes a plan with its versions. The live one stays, and so does one that a weekly time would put live. */
 export const deletePlan = async (actor: Actor, planId: string, version: number): Promise<{ readonly deleted: string }> => {
@@ -28,6 +29,7 @@ export const deletePlan = async (actor: Actor, planId: string, version: number):
     if (error instanceof StaleWrite) {
       throw new AppError('stale', 'Somebody changed this plan since you opened it, so it was not deleted. Look at it again, then delete it if you still want to.', { current: { version: error.version } });
     }
+    if (error instanceof RowMissing) throw planMissing();
     throw error;
   }
 };
