@@ -39,10 +39,10 @@ export function BoardAside() {
   const trouble = useBoard((state) => state.proofTrouble);
   const empty = useBoard((state) => state.content.rules.length === 0);
   return (
-    <aside id="findings" tabIndex={-1} aria-label="Check of this plan" className="grid content-start gap-3.5 border-line bg-panel px-5 py-4.5 max-[1179px]:border-t min-[1180px]:border-t min-[1180px]:border-l">
+    <section id="findings" tabIndex={-1} aria-label="Check of this plan" className="grid content-start gap-3.5 border-line bg-panel px-5 py-4.5 max-[1179px]:border-t min-[1180px]:border-t min-[1180px]:border-l">
       {summary === null ? null : <ProofAside summary={summary} drawFinding={(finding) => <BoardFinding finding={finding} />} />}
       {trouble === '' ? null : <p role="status" className="text-[13px] font-semibold text-look-text">{trouble}</p>}
       {empty ? <p className="text-[13px] text-soft">Begin with the tray: send each menu section to the station that cooks it.</p> : null}
-    </aside>
+    </section>
   );
 }

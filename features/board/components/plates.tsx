@@ -15,7 +15,7 @@ function OnePlate({ plate, first, canFix }: { readonly plate: Plate; readonly fi
       {first ? <p className={styles['plateWhere']}>{plate.where}</p> : null}
       {plate.wrong === null ? <p className={styles['plateQuiet']}>{plate.quiet}</p> : (
         <p className={styles['plateWrong']}>
-          {plate.wrong.words}{' '}
+          {plate.wrong.words}.{' '}
           {mend !== null && canFix ? (
             <button type="button" className={styles['plateFix']} onClick={() => fix.apply(mend)}>{mend.label}</button>
           ) : null}

@@ -3,7 +3,7 @@ import type { PlanContent, Rule } from '../site/plan';
 import type { BoardItem, BoardSite } from './board-site';
 import { isUnconditional, sayConditions } from './conditions';
 import { sayTarget, targetKey } from './targets';
-import { countWords, listWords } from './words';
+import { countWords, listWords, readsAsPlural } from './words';
 
 export const sayStations = (site: BoardSite, stations: readonly string[]): string =>
   listWords(site.stations.filter((station) => stations.includes(station.id)).map((station) => station.name)) || 'a station that has gone';
@@ -82,7 +82,10 @@ const splitNotes = (rule: Rule, index: RuleIndex, site: BoardSite): readonly str
 const conditionalNotes = (rule: Rule, index: RuleIndex, site: BoardSite): readonly string[] =>
   (index.sends.get(targetKey(rule.target)) ?? [])
     .filter((other) => !isUnconditional(other.conditions))
-    .map((other) => `${sayConditions(other.conditions, site)} prints at ${sayStations(site, other.stations)}`);
+    .map((other) => {
+      const when = sayConditions(other.conditions, site);
+      return `${when} ${readsAsPlural(when) ? 'print' : 'prints'} at ${sayStations(site, other.stations)}`;
+    });
 
 const exceptionNotes = (rule: Rule, index: RuleIndex, site: BoardSite): readonly string[] => {
   if (rule.target.kind !== 'section') return [];

@@ -112,5 +112,6 @@ export const platesOf = (site: Site, station: Station, findings: readonly Findin
 /** "Stand-in Sauce", "No stand-in"; a station that is closed says so first. */
 export const standInWords = (station: Station, site: Site): string => {
   const standIn = site.stations.find((candidate) => candidate.id === station.standIn)?.name;
-  return listWords([station.open ? '' : 'Closed', standIn === undefined ? 'No stand-in' : `Stand-in ${standIn}`].filter((words) => words !== ''));
+  if (station.open) return standIn === undefined ? 'No stand-in' : `Stand-in ${standIn}`;
+  return standIn === undefined ? 'Closed, no stand-in' : `Closed, stand-in ${standIn}`;
 };
