@@ -19,10 +19,13 @@ function BoardFinding({ finding }: { readonly finding: ProofFinding }) {
   const { siteId, planId } = useSettings();
   const fix = useFix();
   const show = (): void => store.set((state) => ({ ...state, shown: cardsShowing(state, finding, store.site) }));
+  const hide = (): void => store.set((state) => ({ ...state, shown: new Set() }));
   return (
     <FindingCard severity={finding.severity} title={finding.title} message={finding.message}>
       {finding.example === null ? null : (
-        <Link className={findingActionClass} href={tryHref(siteId, planId, finding.example)} onMouseEnter={show} onFocus={show}>Show the way it goes</Link>
+        <Link className={findingActionClass} href={tryHref(siteId, planId, finding.example)} onMouseEnter={show} onMouseLeave={hide} onFocus={show} onBlur={hide}>
+          Show the way it goes
+        </Link>
       )}
       {finding.fixes.filter(fix.canFix).map((mend) => (mend.kind === 'print-test' ? (
         <Link key={mend.label} className={findingActionClass} href={`/sites/${siteId}/printers?printer=${mend.printer}`}>{mend.label}</Link>

@@ -1,6 +1,6 @@
 'use client';
 
-import { memo } from 'react';
+import { memo, useEffect, useRef } from 'react';
 import { Stamp } from '@/components/stamp';
 import { sayCards } from '@/lib/domain/plans/drop';
 import { countWords } from '@/lib/domain/plans/words';
@@ -47,9 +47,15 @@ export const RailRow = memo(function RailRow({ station, folded }: { readonly sta
   const cards = useBoard((state) => railOf(state, station.id)?.cards);
   const here = useBoard((state) => hereWords(state, station));
   const { mayWrite } = useSettings();
+  const row = useRef<HTMLElement>(null);
+  const carried = useBoard((state) => state.lifted?.by === 'keyboard' && state.lifted.over === station.id);
+  useEffect(() => {
+    if (carried) row.current?.scrollIntoView?.({ block: 'nearest' });
+  }, [carried]);
   const empty = (cards?.length ?? 0) === 0 && here === null;
   return (
     <section
+      ref={row}
       aria-labelledby={`rail-${station.id}`}
       data-place={station.id}
       className={`${styles['row'] ?? ''} ${folded ? (styles['folded'] ?? '') : ''} ${here === null ? '' : (styles['under'] ?? '')}`}

@@ -43,7 +43,7 @@ export function RulesPanel({ close }: { readonly close: () => void }) {
   return (
     <SidePanel title={`Rules of ${planName}`} close={close}>
       <PanelNotice />
-      <p className="text-[13px] text-soft">The narrowest rule wins: an item over its section, a till over an area, an area over an order type. Of two equals the lower one wins.</p>
+      <p className="mt-3 text-[13px] text-soft">The narrowest rule wins: an item over its section, a till over an area, an area over an order type. Of two equals the lower one wins.</p>
       {kinds.map(({ kind, title }) => {
         const ofKind = rules.filter((rule) => rule.kind === kind);
         return ofKind.length === 0 ? null : (

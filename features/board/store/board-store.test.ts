@@ -180,6 +180,23 @@ describe('saving', () => {
   });
 });
 
+describe('after a refusal', () => {
+  beforeEach(() => vi.useFakeTimers());
+  afterEach(() => vi.useRealTimers());
+
+  it('the next edit is sent with the refused one: it may be what mends it', async () => {
+    const store = newStore();
+    const { asked, save } = answering({ kind: 'refused', words: 'The station has gone.' });
+    startSaving(store, save);
+    make(store, oystersTo('larder'));
+    await vi.runAllTimersAsync();
+    store.set((state) => undo(state, smallSite));
+    await vi.runAllTimersAsync();
+    expect(asked.at(-1)?.content).toEqual(start);
+    expect(store.get()).toMatchObject({ saving: 'saved', pending: [] });
+  });
+});
+
 describe('edits kept in the browser', () => {
   const storage = (): Storage => {
     const values = new Map<string, string>();

@@ -17,6 +17,9 @@ const tell = (state: BoardState, words: string, offers: 'undo' | 'redo' | 'nothi
   said: { id: state.said.id + 1, words },
 });
 
+/** A save that was refused is tried again with the next edit: it may be the one that mends it. */
+const saveAgain = (state: BoardState): BoardState['saving'] => (state.saving === 'refused' ? 'saving' : state.saving);
+
 /** The state with other content on the board; parts that did not change keep their identity. */
 export const withContent = (state: BoardState, content: PlanContent, site: Site): BoardState => {
   const board = shareStructure(state.board, boardOf(site, content));
@@ -36,6 +39,7 @@ export const makeStep = (state: BoardState, made: readonly MadeEdit[], words: st
     past: [...state.past, step].slice(-stepsKept),
     future: [],
     chosen: new Set(),
+    saving: saveAgain(state),
     ...tell(state, words, 'undo'),
   };
 };
@@ -51,6 +55,7 @@ export const undo = (state: BoardState, site: Site): BoardState => {
     pending: [...state.pending, { edit: { kind: 'restore', content: step.content, words }, words }],
     past: state.past.slice(0, -1),
     future: [...state.future, { content: state.content, words: step.words }],
+    saving: saveAgain(state),
     ...tell(state, words, 'redo'),
   };
 };
@@ -64,6 +69,7 @@ export const redo = (state: BoardState, site: Site): BoardState => {
     pending: [...state.pending, { edit: { kind: 'restore', content: step.content, words }, words }],
     past: [...state.past, { content: state.content, words: step.words }],
     future: state.future.slice(0, -1),
+    saving: saveAgain(state),
     ...tell(state, words, 'undo'),
   };
 };

@@ -3,7 +3,7 @@ import type { PlanContent, Rule } from '../site/plan';
 import type { BoardItem, BoardSite } from './board-site';
 import { isUnconditional, sayConditions } from './conditions';
 import { sayTarget, targetKey } from './targets';
-import { countWords, listWords, readsAsPlural } from './words';
+import { countWords, listWords, readsAsPlural, splitsVerb } from './words';
 
 export const sayStations = (site: BoardSite, stations: readonly string[]): string =>
   listWords(site.stations.filter((station) => stations.includes(station.id)).map((station) => station.name)) || 'a station that has gone';
@@ -76,7 +76,7 @@ const splitNotes = (rule: Rule, index: RuleIndex, site: BoardSite): readonly str
         ? sayTarget({ kind: 'option', option: split.target.option }, site)
         : sayTarget(split.target, site);
       const when = sayConditions(split.conditions, site);
-      return `${option} splits to ${sayStations(site, split.stations)}${when === '' ? '' : ` (${when})`}`;
+      return `${option} ${splitsVerb(option)} to ${sayStations(site, split.stations)}${when === '' ? '' : ` (${when})`}`;
     });
 
 const conditionalNotes = (rule: Rule, index: RuleIndex, site: BoardSite): readonly string[] =>

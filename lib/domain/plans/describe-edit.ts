@@ -6,7 +6,7 @@ import type { HungCard, PlanEdit } from './edit';
 import { sayRule } from './say-rule';
 import type { CopyTarget, SendTarget } from './targets';
 import { sayTarget } from './targets';
-import { capitalise, countWords, listWords } from './words';
+import { capitalise, countWords, listWords, splitsVerb } from './words';
 
 /** Two names at most, then a count in the kitchen's words. */
 const sayTargets = (targets: readonly (SendTarget | CopyTarget)[], site: BoardSite): string => {
@@ -48,7 +48,7 @@ export const describeEdit = (edit: PlanEdit, site: BoardSite, content: PlanConte
     case 'split':
       return edit.stations.length === 0
         ? capitalise(`${sayTarget(edit.target, site)} stays with its dish${when(edit.conditions, site)}`)
-        : capitalise(`${sayTarget(edit.target, site)} splits to ${sayStations(site, edit.stations)}${when(edit.conditions, site)}`);
+        : capitalise(`${sayTarget(edit.target, site)} ${splitsVerb(sayTarget(edit.target, site))} to ${sayStations(site, edit.stations)}${when(edit.conditions, site)}`);
     case 'copy': {
       const names = edit.targets.some((target) => target.kind === 'everything') ? 'everything' : sayTargets(edit.targets, site);
       const stations = sayStations(site, edit.stations);

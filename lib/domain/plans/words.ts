@@ -13,4 +13,7 @@ export const countWords = (count: number, singular: string, plural = `${singular
 /** Whether a heading of a menu takes a plural verb: "Oysters print", "Late menu prints". */
 export const readsAsPlural = (name: string): boolean => / and /i.test(name) || /[^s]s$/i.test(name.trim());
 
+/** "side salad splits", "chips split"; of "chips with Burgers" the option decides. */
+export const splitsVerb = (name: string): string => (readsAsPlural(name.split(' with ')[0] ?? name) ? 'split' : 'splits');
+
 export const capitalise = (sentence: string): string => sentence.charAt(0).toUpperCase() + sentence.slice(1);
