@@ -17,7 +17,7 @@ export const savePlan = async (siteId: string, planId: string, { version, conten
     if (isLostConnection(error) || passing.includes(problem.status)) return { kind: 'unreachable' };
     if (problem.code === 'stale' && problem.current !== undefined) {
       const current = problem.current as PlanAnswer;
-      return { kind: 'stale', version: current.version, content: current.content, by: current.byYou ? 'You, in another window,' : current.changedBy };
+      return { kind: 'stale', version: current.version, content: current.content, by: current.byYou ? 'Another window of yours' : current.changedBy };
     }
     return { kind: 'refused', words: problem.detail };
   }
