@@ -2,9 +2,8 @@ import { expect, sitePage, test, type Page } from './setup/people';
 
 const rail = (page: Page, station: string) => page.getByRole('region', { name: station, exact: true }).getByRole('list');
 const tray = (page: Page) => page.getByRole('region', { name: 'Prints nowhere yet' });
-const verdict = (page: Page) => page.getByRole('complementary', { name: 'Check of this plan' }).getByRole('heading', { level: 2 });
+const verdict = (page: Page) => page.getByRole('region', { name: 'Check of this plan' }).getByRole('heading', { level: 2 });
 
-/** The card code arrives after the first paint; a card that says it can be lifted is ready. */
 const openBoard = async (page: Page): Promise<void> => {
   await page.goto(sitePage('chef', 'board'));
   await expect(verdict(page)).toHaveText('10 items would print nowhere');
@@ -42,20 +41,21 @@ test.describe('a chef at the board', () => {
   test('drags a section to a rail with the mouse', async ({ page }) => {
     await openBoard(page);
     const card = tray(page).getByRole('button', { name: 'Oysters 4 items' });
-    await expect(card).toHaveAttribute('aria-roledescription', /.+/);
-    const from = (await card.boundingBox())!;
-    const to = (await page.getByRole('region', { name: 'Larder', exact: true }).boundingBox())!;
-    await page.mouse.move(from.x + 40, from.y + 20);
-    await page.mouse.down();
-    for (let step = 1; step <= 12; step += 1) await page.mouse.move(from.x + 40 + ((to.x + 500 - from.x - 40) * step) / 12, from.y + 20 + ((to.y + 50 - from.y - 20) * step) / 12);
-    await page.mouse.up();
-    await expect(rail(page, 'Larder')).toContainText('Oysters');
+    /** The drag code arrives after the first paint; a hand that was too quick tries again. */
+    await expect(async () => {
+      const from = (await card.boundingBox())!;
+      const to = (await page.getByRole('region', { name: 'Larder', exact: true }).boundingBox())!;
+      await page.mouse.move(from.x + 40, from.y + 20);
+      await page.mouse.down();
+      for (let step = 1; step <= 12; step += 1) await page.mouse.move(from.x + 40 + ((to.x + 500 - from.x - 40) * step) / 12, from.y + 20 + ((to.y + 50 - from.y - 20) * step) / 12);
+      await page.mouse.up();
+      await expect(rail(page, 'Larder')).toContainText('Oysters', { timeout: 2_000 });
+    }).toPass();
   });
 
   test('moves a section with the keyboard alone, and hears each step', async ({ page }) => {
     await openBoard(page);
     const card = tray(page).getByRole('button', { name: 'Oysters 4 items' });
-    await expect(card).toHaveAttribute('aria-roledescription', /.+/);
     await card.focus();
     await page.keyboard.press('Space');
     await expect(page.getByRole('status').filter({ hasText: 'Oysters' })).toContainText(/lifted/i);
@@ -69,7 +69,6 @@ test.describe('a chef at the board', () => {
   test('puts a lifted section back with Escape, and nothing is saved', async ({ page }) => {
     await openBoard(page);
     const card = tray(page).getByRole('button', { name: 'Oysters 4 items' });
-    await expect(card).toHaveAttribute('aria-roledescription', /.+/);
     await card.focus();
     await page.keyboard.press('Space');
     await page.keyboard.press('ArrowDown');
@@ -82,19 +81,20 @@ test.describe('a chef at the board', () => {
   test('moves a section with a finger: press and hold, carry, let go @touch', async ({ page }) => {
     await openBoard(page);
     const card = tray(page).getByRole('button', { name: 'Oysters 4 items' });
-    await expect(card).toHaveAttribute('aria-roledescription', /.+/);
-    const from = (await card.boundingBox())!;
-    const to = (await page.getByRole('region', { name: 'Larder', exact: true }).boundingBox())!;
     const finger = await page.context().newCDPSession(page);
     const touch = (type: 'touchStart' | 'touchMove' | 'touchEnd', x?: number, y?: number) =>
       finger.send('Input.dispatchTouchEvent', { type, touchPoints: x === undefined || y === undefined ? [] : [{ x, y }] });
-    const start = { x: from.x + 40, y: from.y + 20 };
-    const end = { x: to.x + 400, y: to.y + 50 };
-    await touch('touchStart', start.x, start.y);
-    await page.waitForTimeout(450);
-    for (let step = 1; step <= 12; step += 1) await touch('touchMove', start.x + ((end.x - start.x) * step) / 12, start.y + ((end.y - start.y) * step) / 12);
-    await touch('touchEnd');
-    await expect(rail(page, 'Larder')).toContainText('Oysters');
+    await expect(async () => {
+      const from = (await card.boundingBox())!;
+      const to = (await page.getByRole('region', { name: 'Larder', exact: true }).boundingBox())!;
+      const start = { x: from.x + 40, y: from.y + 20 };
+      const end = { x: to.x + 400, y: to.y + 50 };
+      await touch('touchStart', start.x, start.y);
+      await page.waitForTimeout(450);
+      for (let step = 1; step <= 12; step += 1) await touch('touchMove', start.x + ((end.x - start.x) * step) / 12, start.y + ((end.y - start.y) * step) / 12);
+      await touch('touchEnd');
+      await expect(rail(page, 'Larder')).toContainText('Oysters', { timeout: 2_000 });
+    }).toPass();
   });
 
   test('is told when somebody else changed the plan first, and does their own again on the newest', async ({ page, browser }) => {

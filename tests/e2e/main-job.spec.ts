@@ -16,7 +16,7 @@ test('an owner brings in a menu: a dry run says each bad line, and the mended fi
   await expect(panel.getByRole('status')).toContainText('2 items are new');
   await panel.getByRole('button', { name: 'Done' }).click();
   await page.getByRole('navigation', { name: 'Menu sections' }).getByRole('link', { name: /Soups/ }).click();
-  await expect(page.getByLabel('Name of Bisque')).toHaveValue('Bisque');
+  await expect(page.getByLabel('Name of Bisque', { exact: true })).toHaveValue('Bisque');
 });
 
 test('a chef changes the menu by keys alone: a name, the next line, sold out, and back', async ({ page }) => {
@@ -62,7 +62,8 @@ test('an installer who types a short address is told what it would become, befor
 test('a trainer tries a ready order, reads why a dish is on two tickets, and keeps the order over a reload', async ({ page }) => {
   await signIn(page, 'trainer');
   await page.goto(sitePage('trainer', 'try'));
-  await page.getByRole('button', { name: /House burger with side salad/ }).click();
+  await page.getByLabel('Plan', { exact: true }).selectOption('Dinner as edited, not live yet');
+  await page.getByRole('button', { name: /with side salad/ }).click();
   await expect(page.getByText('SIDE SALAD').first()).toBeVisible();
   await expect(page.getByText(/splits to Larder/).first()).toBeVisible();
   await page.reload();
