@@ -1,6 +1,6 @@
 /**
  * What the application is told at its start (lib/env.ts reads it). What the person set in the environment wins.
- * @param {{ secrets: { sessionSecret: string, demoPassword: string }, databaseUrl: string, mailUrl: string, address: string, given?: NodeJS.ProcessEnv }} parts
+ * @param {{ secrets: { sessionSecret: string, demoPassword: string }, databaseUrl: string, mailUrl: string, address: string, given?: Readonly<Record<string, string | undefined>> }} parts
  */
 export const settingsFor = ({ secrets, databaseUrl, mailUrl, address, given = process.env }) => ({
   ...given,

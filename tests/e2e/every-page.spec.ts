@@ -9,9 +9,9 @@ test.describe('every page', () => {
 
   test('can be used by anybody: axe finds nothing, nothing runs off the side, nothing fails @widths', async ({ page }) => {
     test.setTimeout(240_000);
-    const failures: string[] = [];
-    page.on('pageerror', (error) => failures.push(`${page.url()}: ${error.message}`));
-    page.on('console', (message) => message.type() === 'error' && failures.push(`${page.url()}: ${message.text()}`));
+    const failures = new Set<string>();
+    page.on('pageerror', (error) => failures.add(`${page.url()}: ${error.message}`));
+    page.on('console', (message) => message.type() === 'error' && failures.add(`${page.url()}: ${message.text()} ${message.location().url}`));
 
     for (const { name, address } of await demoPages(personWith('owner').siteId))
       await test.step(name, async () => {
@@ -23,7 +23,7 @@ test.describe('every page', () => {
         const overhang = await page.evaluate(() => document.documentElement.scrollWidth - document.documentElement.clientWidth);
         expect.soft(overhang, `${name} fits the screen's width`).toBeLessThanOrEqual(0);
       });
-    expect(failures).toEqual([]);
+    expect([...failures]).toEqual([]);
   });
 });
 
