@@ -1,6 +1,6 @@
 import type { Metadata, Viewport } from 'next';
-import { cookies } from 'next/headers';
 import type { ReactNode } from 'react';
+import { chosenLight } from '@/lib/server/chosen-light';
 import './globals.css';
 
 export const metadata: Metadata = {
@@ -11,9 +11,9 @@ export const metadata: Metadata = {
 export const viewport: Viewport = { width: 'device-width', initialScale: 1, themeColor: '#20251f' };
 
 export default async function RootLayout({ children }: { readonly children: ReactNode }) {
-  const light = (await cookies()).get('light')?.value;
+  const light = await chosenLight();
   return (
-    <html lang="en" data-light={light === 'low' || light === 'light' ? light : undefined}>
+    <html lang="en" data-light={light}>
       <body>{children}</body>
     </html>
   );

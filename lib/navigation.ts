@@ -1,8 +1,10 @@
 import type { Role } from '@/lib/domain/roles/permissions';
 
+/** `path` is below the site, unless it starts with a slash. */
 export type PageLink = { readonly name: string; readonly path: string };
 
 const pages = {
+  sites: { name: 'Sites', path: '/sites' },
   board: { name: 'Board', path: 'board' },
   menu: { name: 'Menu', path: 'menu' },
   stations: { name: 'Stations', path: 'stations' },
@@ -18,11 +20,15 @@ const pages = {
 const pagesOf: Readonly<Record<Role, readonly PageLink[]>> = {
   owner: [pages.board, pages.menu, pages.stations, pages.printers, pages.tills, pages.proof, pages.try, pages.people, pages.settings],
   chef: [pages.board, pages.menu, pages.stations, pages.proof, pages.try],
-  installer: [pages.printers, pages.tills, pages.settings, pages.board, pages.proof, pages.try],
+  installer: [pages.sites, pages.printers, pages.tills, pages.settings, pages.board, pages.proof, pages.try],
   trainer: [pages.board, pages.menu, pages.proof, pages.try],
 };
 
 export const navigationFor = (role: Role): readonly PageLink[] => pagesOf[role];
 
-/** Where a person starts on a site. */
-export const homePath = (siteId: string, role: Role): string => `/sites/${siteId}/${pagesOf[role][0]?.path ?? 'board'}`;
+export const hrefOf = ({ path }: PageLink, siteId: string): string => (path.startsWith('/') ? path : `/sites/${siteId}/${path}`);
+
+/** Where each role starts on a site: with what is wrong there that is theirs to mend. */
+const homeOf = { owner: pages.board, chef: pages.board, installer: pages.printers, trainer: pages.board } as const satisfies Readonly<Record<Role, PageLink>>;
+
+export const homePath = (siteId: string, role: Role): string => hrefOf(homeOf[role], siteId);

@@ -1,10 +1,10 @@
 import { ButtonLink } from '@/components/button';
-import { MessagePage } from '@/components/message-page';
+import { Message } from '@/components/message';
 
 export default function NotFound() {
   return (
-    <MessagePage title="There is nothing at this address" words="It may have been renamed or deleted, or it belongs to a site that is not yours. Nothing on the tills changes: tickets print as before.">
+    <Message title="There is nothing at this address" words="It may have been renamed or deleted, or it belongs to a site that is not yours. Nothing on the tills changes: tickets print as before.">
       <ButtonLink kind="primary" href="/sites">Go to my sites</ButtonLink>
-    </MessagePage>
+    </Message>
   );
 }
