@@ -22,7 +22,7 @@ const tieFinding = (site: Site, plan: Plan, names: Names, { winner, loser, way }
 };
 
 /** What a rule that never wins has to be told: nothing to cover, taken by equals, or all exceptions. */
-const useFinding = (plan: Plan, names: Names, use: RuleUse): ProofFinding | null => {
+const findingOfUse = (plan: Plan, names: Names, use: RuleUse): ProofFinding | null => {
   if (use.won > 0) return null;
   const words = ruleWords(use.rule, names);
   const shared = { subject: { kind: 'rule' as const, id: use.rule.id }, fixes: removeRule(plan, use.rule), example: null };
@@ -50,7 +50,7 @@ export const ruleFindings = (site: Site, plan: Plan, ways: Ways): readonly Proof
   const names = namesOf(site);
   return [
     ...ways.ties.map((tie) => tieFinding(site, plan, names, tie)),
-    ...ways.uses.flatMap((use) => useFinding(plan, names, use) ?? []),
+    ...ways.uses.flatMap((use) => findingOfUse(plan, names, use) ?? []),
     ...circles(site.stations.map(({ id, standIn }) => [id, standIn] as const)).map((circle) => circleFinding('station', circle, names.station)),
     ...circles(site.printers.map(({ id, backup }) => [id, backup] as const)).map((circle) => circleFinding('printer', circle, names.printer)),
   ];
