@@ -62,12 +62,20 @@ test('an installer who types a short address is told what it would become, befor
 test('a trainer tries a ready order, reads why a dish is on two tickets, and keeps the order over a reload', async ({ page }) => {
   await signIn(page, 'trainer');
   await page.goto(sitePage('trainer', 'try'));
-  await page.getByLabel('Plan', { exact: true }).selectOption('Dinner as edited, not live yet');
+  await page.getByRole('combobox', { name: 'Plan' }).selectOption('Dinner as edited, not live yet');
   await page.getByRole('button', { name: /with side salad/ }).click();
   await expect(page.getByText('SIDE SALAD').first()).toBeVisible();
   await expect(page.getByText(/splits to Larder/).first()).toBeVisible();
   await page.reload();
   await expect(page.getByText('SIDE SALAD').first()).toBeVisible();
+});
+
+test('a finding shows its example as an order, and its way on paper', async ({ page }) => {
+  await signIn(page, 'chef');
+  await page.goto(sitePage('chef', 'board'));
+  await page.getByRole('link', { name: 'Show the way it goes' }).click();
+  await expect(page.getByText('1 line would print nowhere')).toBeVisible();
+  await expect(page.getByText(/has no rule that sends it to a station/).first()).toBeVisible();
 });
 
 test('each person finds the handful of pages that are theirs', async ({ page }) => {

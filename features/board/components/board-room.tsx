@@ -21,7 +21,8 @@ import { useProof } from './use-proof';
 import { useUndoKeys } from './use-undo-keys';
 
 const DragLayer = dynamic(() => import('./drag-layer'), { ssr: false });
-const OpenedLayer = dynamic(() => import('./opened-layer'), { ssr: false });
+const loadOpenedLayer = () => import('./opened-layer');
+const OpenedLayer = dynamic(loadOpenedLayer, { ssr: false });
 
 type BoardRoomProps = {
   readonly site: BoardSite;
@@ -45,6 +46,10 @@ export function BoardRoom({ site, content, version, proof, settings, children }:
     const timer = setTimeout(() => setPainted(true), 0);
     return () => clearTimeout(timer);
   }, []);
+  // The list of stations must open with the first press, and also when the network has gone by then.
+  useEffect(() => {
+    if (painted) void loadOpenedLayer();
+  }, [painted]);
   useEffect(() => store.readSite(site), [store, site]);
   useEffect(() => store.set((state) => receiveReading(state, { content, version }, store.site)), [store, content, version]);
   return (

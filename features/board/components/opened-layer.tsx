@@ -9,7 +9,7 @@ import { SendMenu } from './send-menu';
 
 type OpenedLayerProps = { readonly opened: NonNullable<Opened>; readonly close: () => void };
 
-/** What a press on the board opens; loaded with the first press. */
+/** What a press on the board opens; loaded after the first paint. */
 export default function OpenedLayer({ opened, close }: OpenedLayerProps) {
   switch (opened.kind) {
     case 'send': return <SendMenu key={opened.cards.join()} cards={opened.cards} beside={opened.beside} close={close} />;

@@ -4,6 +4,7 @@ import { useEffect, useState } from 'react';
 import { emptyOrder } from '@/lib/domain/orders/edit-order';
 import type { Order } from '@/lib/domain/orders/order';
 import type { Site } from '@/lib/domain/site/site';
+import { linkedDraft } from '../linked-draft';
 import { planOfKey, type PlanChoice } from '../plan-choices';
 import { draftSchema, type Draft } from '../schema';
 
@@ -27,8 +28,15 @@ const keptDraft = (site: Site, choices: readonly PlanChoice[]): Draft | null => 
 
 /** The order being written: kept over a reload, and the one before it can be brought back. */
 export const useDraft = (site: Site, choices: readonly PlanChoice[]) => {
-  const [draft, setDraft] = useState<Draft | null>(() => keptDraft(site, choices) ?? freshDraft(site, choices));
+  const [draft, setDraft] = useState<Draft | null>(() => {
+    const kept = keptDraft(site, choices);
+    return linkedDraft(site, choices, kept, new URLSearchParams(location.search)) ?? kept ?? freshDraft(site, choices);
+  });
   const [before, setBefore] = useState<Order | null>(null);
+  // A reload goes on with what was written since, not with the link again.
+  useEffect(() => {
+    if (location.search !== '') history.replaceState(history.state, '', location.pathname);
+  }, []);
   useEffect(() => {
     if (draft === null) return;
     try {
