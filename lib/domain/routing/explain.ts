@@ -108,9 +108,17 @@ const printerSentences = (route: StationRoute, till: string, names: Names): read
     const reasons = failed.length === 0 ? 'it has no printer' : listed(failed.map((tried) => whyNot(tried, till, names)));
     return [say(6, station, ` prints nowhere: ${reasons}.`, 'lost')];
   }
+  if (failed.length === 0 && winner.insteadOf === null) return [];
   const because = failed.length === 0 ? '' : `, since ${listed(failed.map((tried) => whyNot(tried, till, names)))}`;
   const diverted = winner.insteadOf === null ? '' : ` in place of ${names.printer(winner.insteadOf)}`;
-  return [say(6, names.printer(winner.printer), ` prints for ${station}${diverted}${because}.`, failed.length === 0 && diverted === '' ? 'plain' : 'look')];
+  return [say(6, names.printer(winner.printer), ` prints for ${station}${diverted}${because}.`, 'look')];
+};
+
+/** The printers that print at the first try, all in one sentence. */
+const answeringSentence = (routes: readonly StationRoute[], till: string, names: Names): readonly Sentence[] => {
+  const first = routes.flatMap((route) => route.choice?.tries.slice(0, 1) ?? []).filter((tried) => tried.result === 'prints' && tried.insteadOf === null);
+  const printers = [...new Set(first.map((tried) => names.printer(tried.printer)))];
+  return printers.length === 0 ? [] : [say(6, listed(printers), ` ${printers.length === 1 ? 'answers' : 'answer'} from ${till}.`)];
 };
 
 const outcomeSentence = (route: LineRoute, names: Names): Sentence => {
@@ -142,6 +150,7 @@ export const explainLine = (route: LineRoute, site: Site): readonly Sentence[] =
     ...route.copies.map((copy) => say(4, names.station(copy.reached ?? copy.asked), ` gets a copy: ${ruleWords(copy.rule, names)}.`)),
     ...(divert === null ? [] : [say(5, divert.kind === 'item' ? names.item(divert.item) : names.section(divert.section), ` is diverted to ${stationList(divert.to, names)} for now.`, 'look')]),
     ...parts.flatMap((part) => hopSentences(part, names)),
+    ...answeringSentence(parts, till, names),
     ...parts.flatMap((part) => printerSentences(part, till, names)),
     outcomeSentence(route, names),
   ]);

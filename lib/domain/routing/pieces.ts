@@ -34,6 +34,10 @@ export const allergiesOf = (order: Pick<Order, 'allergies'>, line: OrderLine): r
   ...line.allergies,
 ])];
 
+/** Stations whose paper really comes out; a code on a copy never points to a cook who has nothing. */
+const printing = (routes: readonly StationRoute[]): readonly StationId[] =>
+  routes.flatMap((one) => (one.reached === null || one.printer === null ? [] : [one.reached]));
+
 /** Looks up what pieces need of a site, once for an order. */
 export const pieceMaker = (site: Site) => {
   const items = new Map(site.menu.items.map((item) => [item.id, item]));
@@ -66,7 +70,7 @@ export const pieceMaker = (site: Site) => {
     const dishName = item === undefined ? line.item : kitchenNameOf(item);
     const course = line.course ?? item?.course ?? null;
     const splits = new Map<OptionId, SplitPart>(route.splits.map((split) => [split.option, split]));
-    const splitStations = (option: OptionId): readonly StationId[] => (splits.get(option)?.routes ?? []).flatMap((one) => (one.reached === null ? [] : [one.reached]));
+    const splitStations = (option: OptionId): readonly StationId[] => printing(splits.get(option)?.routes ?? []);
     const shared = { sourceLine, quantity, note: line.note, seat: line.seat, allergies: allergiesOf(order, line), marks };
 
     const optionsAt = (station: StationId, kind: 'cook' | 'copy'): readonly TicketOption[] => line.options.flatMap((option) => {
@@ -86,7 +90,7 @@ export const pieceMaker = (site: Site) => {
       }
     };
 
-    const cooking = route.cook.routes.flatMap((one) => (one.reached === null ? [] : [one.reached]));
+    const cooking = printing(route.cook.routes);
     if (route.cook.routes.length === 0) losses.push({ sourceLine, kind: 'cook', option: null, station: null });
     for (const one of route.cook.routes) {
       add('cook', null, one, (station) => ({ ...shared, name: dishName, options: optionsAt(station, 'cook'), forDish: null, stationCodes: [] }));
