@@ -1,6 +1,6 @@
 'use client';
 
-import { useEffect, useState, type ClipboardEvent, type DragEvent, type KeyboardEvent } from 'react';
+import { useState, type ClipboardEvent, type DragEvent, type KeyboardEvent } from 'react';
 import { allergens } from '@/lib/domain/site/menu';
 import type { MenuView } from '../menu-view';
 import { readBlock, type PasteColumn } from '../paste-rows';
@@ -24,7 +24,7 @@ type CellProps = {
   readonly value: string;
   readonly column: PasteColumn;
   readonly className?: string | undefined;
-  readonly save: (text: string) => boolean;
+  readonly save: (text: string) => void;
   readonly onPaste: (block: readonly (readonly string[])[]) => void;
 };
 
@@ -38,14 +38,14 @@ const moveFocus = (cell: HTMLElement, step: 1 | -1): void => {
 
 /** A cell that is a text box: Enter saves and goes down, Escape brings back what was there, a pasted block fills lines. */
 function TextCell({ label, value, column, className, save, onPaste }: CellProps) {
-  const [text, setText] = useState(value);
-  useEffect(() => setText(value), [value]);
+  const [typed, setTyped] = useState<string | null>(null);
   const commit = (): void => {
-    if (text !== value && !save(text)) setText(value);
+    if (typed !== null && typed !== value) save(typed);
+    setTyped(null);
   };
   const onKeyDown = (event: KeyboardEvent<HTMLInputElement>): void => {
     if (event.altKey) return;
-    if (event.key === 'Escape') setText(value);
+    if (event.key === 'Escape') setTyped(null);
     else if (event.key === 'Enter' || event.key === 'ArrowDown' || event.key === 'ArrowUp') {
       event.preventDefault();
       commit();
@@ -58,7 +58,7 @@ function TextCell({ label, value, column, className, save, onPaste }: CellProps)
     event.preventDefault();
     onPaste(block);
   };
-  return <input type="text" aria-label={label} data-column={column} className={className} value={text} onChange={(event) => setText(event.target.value)} onBlur={commit} onKeyDown={onKeyDown} onPaste={take} />;
+  return <input type="text" aria-label={label} data-column={column} className={className} value={typed ?? value} onChange={(event) => setTyped(event.target.value)} onBlur={commit} onKeyDown={onKeyDown} onPaste={take} />;
 }
 
 const number = (text: string): number | null | undefined => (text.trim() === '' ? null : /^\d{1,6}$/.test(text.trim()) ? Number(text) : undefined);
@@ -68,10 +68,9 @@ export function ItemRow({ line, index, view, change, drop, move, paste }: RowPro
   const { id, input } = line;
   const { name } = input;
   const set = (part: Partial<ItemInput>, words?: string): void => change(id, { ...input, ...part }, words);
-  const setNumber = (key: 'preparationSeconds' | 'left', text: string): boolean => {
+  const setNumber = (key: 'preparationSeconds' | 'left', text: string): void => {
     const value = number(text);
     if (value !== undefined) set({ [key]: value });
-    return value !== undefined;
   };
   const onKeyDown = (event: KeyboardEvent): void => {
     if (!event.altKey || (event.key !== 'ArrowUp' && event.key !== 'ArrowDown')) return;
@@ -87,8 +86,8 @@ export function ItemRow({ line, index, view, change, drop, move, paste }: RowPro
   return (
     <tr onKeyDown={onKeyDown} onDragOver={(event) => event.preventDefault()} onDrop={onDrop} className={input.soldOut ? styles['soldOut'] : undefined}>
       <td><button type="button" draggable aria-label={`Move ${name}: Alt and the arrow keys`} title="Drag, or Alt and the arrow keys" className={styles['handle']} onDragStart={(event) => event.dataTransfer.setData('application/x-tamis-line', String(index))}>⋮⋮</button></td>
-      <th scope="row"><TextCell label={`Name of ${name}`} column="name" value={name} onPaste={pasteAt('name')} save={(text) => { const next = text.trim(); if (next !== '') set({ name: next }); return next !== ''; }} /></th>
-      <td><TextCell label={`Kitchen name of ${name}`} column="kitchenName" className={styles['kitchen']} value={input.kitchenName} onPaste={pasteAt('kitchenName')} save={(text) => { set({ kitchenName: text.trim() }); return true; }} /></td>
+      <th scope="row"><TextCell label={`Name of ${name}`} column="name" value={name} onPaste={pasteAt('name')} save={(text) => { if (text.trim() !== '') set({ name: text.trim() }); }} /></th>
+      <td><TextCell label={`Kitchen name of ${name}`} column="kitchenName" className={styles['kitchen']} value={input.kitchenName} onPaste={pasteAt('kitchenName')} save={(text) => set({ kitchenName: text.trim() })} /></td>
       <td>
         <select aria-label={`Course of ${name}`} value={input.course ?? ''} onChange={(event) => set({ course: event.target.value === '' ? null : event.target.value })}>
           <option value="">None</option>
