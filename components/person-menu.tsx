@@ -15,12 +15,12 @@ const lights: readonly (readonly [Light, string])[] = [['system', 'As this devic
 
 /** Who is signed in, and what is theirs alone. Opens, closes and submits without any script. */
 export function PersonMenu({ person, light, manySites }: PersonMenuProps) {
-  const [given = person.name] = person.name.split(' ');
+  const [given, ...rest] = person.name.split(' ');
   return (
     <div className="sm:border-l sm:border-line-on-night sm:pl-4">
       <button type="button" popoverTarget="person-menu" className="flex min-h-9 items-center gap-1.5 text-quiet-on-night pointer-coarse:min-h-11">
         <span>
-          <b className="text-on-night"><span className="hidden sm:inline">{person.name}</span><span className="sm:hidden">{given}</span></b>
+          <b className="text-on-night">{given} <span className="hidden sm:inline">{rest.join(' ')}</span></b>
           {person.title === '' ? null : <span className="hidden sm:inline">, {person.title}</span>}
         </span>
         <svg width="10" height="6" viewBox="0 0 10 6" aria-hidden><path d="M1 1l4 4 4-4" fill="none" stroke="currentColor" strokeWidth="1.5" /></svg>

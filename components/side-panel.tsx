@@ -1,6 +1,7 @@
 'use client';
 
 import { useEffect, useRef, type ReactNode } from 'react';
+import styles from './side-panel.module.css';
 
 type SidePanelProps = {
   readonly title: string;
@@ -25,6 +26,13 @@ export function SidePanel({ title, close, mayClose = () => true, children }: Sid
   const leave = (): void => {
     if (mayClose()) close();
   };
+  /** Asked for again and again, a browser closes a dialog without a question; what was typed has to stay in sight. */
+  const closedUnasked = (): void => {
+    const sheet = dialog.current;
+    if (sheet === null || sheet.open) return;
+    leave();
+    sheet.showModal();
+  };
   return (
     <dialog
       ref={dialog}
@@ -33,14 +41,20 @@ export function SidePanel({ title, close, mayClose = () => true, children }: Sid
         event.preventDefault();
         leave();
       }}
+      onClose={closedUnasked}
+      onKeyDown={(event) => {
+        if (event.key !== 'Escape' || event.defaultPrevented) return;
+        event.preventDefault();
+        leave();
+      }}
       onMouseDown={(event) => {
         if (event.target === dialog.current) leave();
       }}
-      className="fixed inset-y-0 right-0 left-auto m-0 h-dvh max-h-none w-full max-w-[560px] overflow-y-auto overscroll-contain border-l border-line bg-panel p-0 text-ink shadow-2xl backdrop:bg-veil"
+      className={styles['sheet']}
     >
-      <div className="sticky top-0 z-10 flex min-h-14 items-center gap-3 border-b border-line bg-panel px-5 py-2.5">
+      <div className={styles['head']}>
         <h2 className="flex-1 text-[19px] font-[680]">{title}</h2>
-        <button type="button" onClick={leave} className="min-h-9 rounded-md px-3 text-[13.5px] font-semibold underline underline-offset-3 pointer-coarse:min-h-11">Close</button>
+        <button type="button" onClick={leave} className="min-h-9 rounded-md px-3 text-[13.5px] font-semibold underline underline-offset-3 pointer-coarse:min-h-12">Close</button>
       </div>
       <div className="px-5 py-4">{children}</div>
     </dialog>

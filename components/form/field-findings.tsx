@@ -1,3 +1,4 @@
+import { SeverityMark } from '@/components/severity-mark';
 import type { Finding, Fix } from '@/lib/domain/findings/finding';
 
 type FieldFindingsProps = {
@@ -10,10 +11,9 @@ type FieldFindingsProps = {
 export function FieldFindings({ findings, fixIn }: FieldFindingsProps) {
   return findings.map((finding) => (
     <div key={finding.code} className={`rounded-md border px-2.5 py-2 text-[12.5px] ${finding.severity === 'stop' ? 'border-hot bg-hot-tint' : 'border-look bg-look-tint'}`}>
-      <p className={`font-semibold ${finding.severity === 'stop' ? 'text-hot-text' : 'text-look-text'}`}>
-        <span aria-hidden="true">{finding.severity === 'stop' ? '! ' : '? '}</span>
-        <span className="sr-only">{finding.severity === 'stop' ? 'To fix: ' : 'To look at: '}</span>
-        {finding.title}
+      <p className={`flex items-center gap-1.5 font-semibold ${finding.severity === 'stop' ? 'text-hot-text' : 'text-look-text'}`}>
+        <SeverityMark severity={finding.severity} size={15} />
+        <span>{finding.title}</span>
       </p>
       <p className="text-soft">{finding.message}</p>
       {finding.fixes.flatMap((fix) => {
