@@ -114,6 +114,8 @@ test.describe('a chef at the board', () => {
 
   test('loses nothing when the network goes: it is said, kept and saved later', async ({ page, context }) => {
     await openBoard(page);
+    await page.getByRole('button', { name: 'Send to: Oysters' }).click();
+    await page.getByRole('dialog', { name: 'Send Oysters to' }).press('Escape');
     await context.setOffline(true);
     await sendTo(page, 'Oysters', 'Larder');
     await expect(rail(page, 'Larder')).toContainText('Oysters');

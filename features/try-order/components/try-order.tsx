@@ -1,5 +1,6 @@
 'use client';
 
+import dynamic from 'next/dynamic';
 import { useMemo, useState } from 'react';
 import { readyOrders } from '@/lib/domain/orders/ready-orders';
 import { tryOrder } from '@/lib/domain/orders/try-order';
@@ -15,6 +16,8 @@ import { timeOn } from './time-on';
 import styles from './try-order.module.css';
 import { useDraft, type DraftControl } from './use-draft';
 
+const Afterwards = dynamic(() => import('./afterwards').then((loaded) => loaded.Afterwards), { ssr: false });
+
 type TryProps = { readonly site: Site; readonly choices: readonly PlanChoice[]; readonly plan: Plan; readonly draft: Draft; readonly control: DraftControl };
 
 function Trying({ site, choices, plan, draft, control: { change, ...control } }: TryProps) {
@@ -26,13 +29,18 @@ function Trying({ site, choices, plan, draft, control: { change, ...control } }:
     () => tryOrder(site, plan, draft.present === 'now' ? presentOf(site) : allWell, order, { time: openedAt }),
     [site, plan, draft.present, order, openedAt],
   );
+  const present = draft.present === 'now' ? presentOf(site) : allWell;
+  const sendable = order.lines.length > 0 && tried.refusals.length === 0;
   const shared = { site, plan, order, tried, ready, selected, onSelect: setSelected };
   return (
     <>
       <OrderDetails site={site} choices={choices} draft={draft} change={change} setOrder={control.setOrder} />
       <div className={`${styles['lane'] ?? ''} ${order.lines.length === 0 ? (styles['emptyLane'] ?? '') : ''}`}>
         <OrderPad {...shared} {...control} />
-        <Outcome {...shared} onTake={control.replaceOrder} />
+        <div>
+          <Outcome {...shared} onTake={control.replaceOrder} />
+          {sendable ? <Afterwards key={JSON.stringify([draft.plan, draft.present, order])} site={site} choices={choices} plan={plan} present={present} order={order} time={openedAt} /> : null}
+        </div>
       </div>
     </>
   );
