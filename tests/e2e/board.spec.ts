@@ -9,6 +9,9 @@ const openBoard = async (page: Page): Promise<void> => {
   await expect(verdict(page)).toHaveText('10 items would print nowhere');
 };
 
+/** The next change that the server has taken: a test that ends before would change the demo of the one after it. */
+const saved = (page: Page) => page.waitForResponse((response) => response.request().method() === 'PUT' && response.ok());
+
 const sendTo = async (page: Page, section: string, station: string): Promise<void> => {
   await page.getByRole('button', { name: `Send to: ${section}` }).click();
   await page.getByRole('dialog', { name: `Send ${section} to` }).getByRole('button', { name: station, exact: true }).click();
@@ -28,19 +31,24 @@ test.describe('a chef at the board', () => {
     await expect(rail(page, 'Larder')).toContainText('Late menu');
     await sendTo(page, 'Late menu', 'Sauce');
     await expect(rail(page, 'Sauce')).toContainText('Late menu');
+    const save = saved(page);
     await page.getByRole('button', { name: 'Undo', exact: true }).first().click();
     await expect(rail(page, 'Larder')).toContainText('Late menu');
+    await save;
   });
 
   test('mends the loss with the one press that the finding offers', async ({ page }) => {
     await openBoard(page);
+    const save = saved(page);
     await page.getByRole('article').filter({ hasText: 'have no station' }).getByRole('button', { name: /^Send to/ }).click();
     await expect(verdict(page)).not.toContainText('nowhere');
+    await save;
   });
 
   test('drags a section to a rail with the mouse', async ({ page }) => {
     await openBoard(page);
     const card = tray(page).getByRole('button', { name: 'Oysters 4 items' });
+    const save = saved(page);
     /** The drag code arrives after the first paint; a hand that was too quick tries again. */
     await expect(async () => {
       const from = (await card.boundingBox())!;
@@ -51,6 +59,7 @@ test.describe('a chef at the board', () => {
       await page.mouse.up();
       await expect(rail(page, 'Larder')).toContainText('Oysters', { timeout: 2_000 });
     }).toPass();
+    await save;
   });
 
   test('moves a section with the keyboard alone, and hears each step', async ({ page }) => {
@@ -62,8 +71,10 @@ test.describe('a chef at the board', () => {
     await page.keyboard.press('ArrowDown');
     await page.keyboard.press('ArrowDown');
     await expect(page.getByRole('status').filter({ hasText: 'Larder' })).toBeVisible();
+    const save = saved(page);
     await page.keyboard.press('Space');
     await expect(rail(page, 'Larder')).toContainText('Oysters');
+    await save;
   });
 
   test('puts a lifted section back with Escape, and nothing is saved', async ({ page }) => {
@@ -81,6 +92,7 @@ test.describe('a chef at the board', () => {
   test('moves a section with a finger: press and hold, carry, let go @touch', async ({ page }) => {
     await openBoard(page);
     const card = tray(page).getByRole('button', { name: 'Oysters 4 items' });
+    const save = saved(page);
     const finger = await page.context().newCDPSession(page);
     const touch = (type: 'touchStart' | 'touchMove' | 'touchEnd', x?: number, y?: number) =>
       finger.send('Input.dispatchTouchEvent', { type, touchPoints: x === undefined || y === undefined ? [] : [{ x, y }] });
@@ -95,6 +107,7 @@ test.describe('a chef at the board', () => {
       await touch('touchEnd');
       await expect(rail(page, 'Larder')).toContainText('Oysters', { timeout: 2_000 });
     }).toPass();
+    await save;
   });
 
   test('is told when somebody else changed the plan first, and does their own again on the newest', async ({ page, browser }) => {
@@ -106,7 +119,9 @@ test.describe('a chef at the board', () => {
     await expect(rail(second, 'Grill')).toContainText('Late menu');
     await sendTo(page, 'Oysters', 'Larder');
     const refusal = page.getByRole('alertdialog', { name: 'Changed by somebody else' });
+    const save = saved(page);
     await refusal.getByRole('button', { name: /again on the newest/ }).click();
+    await save;
     await expect(rail(page, 'Larder')).toContainText('Oysters');
     await expect(rail(page, 'Grill')).toContainText('Late menu');
     await other.close();

@@ -27,7 +27,7 @@ export function MenuPage({ view, mayWrite }: MenuPageProps) {
       {sections.length === 0 ? (
         <div className="px-4 py-4 md:px-[22px]"><EmptyState title="No menu yet" words="Bring in the menu as a table that a spreadsheet or the ordering software can save, or write the first menu section by hand. Then hang its sections on stations." /></div>
       ) : (
-        <div className="grid gap-4 px-4 py-4 md:grid-cols-[230px_minmax(0,1fr)] md:px-[22px]">
+        <div className="grid grid-cols-[minmax(0,1fr)] gap-4 px-4 py-4 md:grid-cols-[230px_minmax(0,1fr)] md:px-[22px]">
           <nav aria-label="Menu sections" className="min-w-0">
             <ul className="flex gap-1.5 overflow-x-auto pb-2 md:grid md:overflow-visible md:pb-0">
               {sections.map((one) => (
