@@ -8,8 +8,7 @@ export function PageHead({ title, sub, children }: PageHeadProps) {
     <header className="flex min-h-14 flex-wrap items-center gap-x-3.5 gap-y-2 px-4 pt-3.5 md:px-[22px]">
       <h1>{title}</h1>
       {sub === undefined ? null : <p className="text-[13px] text-soft">{sub}</p>}
-      <div className="flex-1" />
-      {children}
+      <div className="flex flex-wrap items-center gap-x-3.5 gap-y-2 empty:hidden md:ml-auto">{children}</div>
     </header>
   );
 }
