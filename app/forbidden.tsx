@@ -1,4 +1,4 @@
-import { ButtonLink } from '@/components/button';
+import { ButtonLink } from '@/components/button-link';
 import { MessagePage } from '@/components/message-page';
 
 export default function Forbidden() {

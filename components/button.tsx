@@ -1,4 +1,3 @@
-import Link from 'next/link';
 import type { ComponentProps } from 'react';
 
 export type ButtonKind = 'primary' | 'plain' | 'hot' | 'wait';
@@ -16,8 +15,4 @@ export const buttonClass = (kind: ButtonKind = 'plain', more = ''): string =>
 
 export function Button({ kind = 'plain', type = 'button', className, ...rest }: ComponentProps<'button'> & { readonly kind?: ButtonKind }) {
   return <button type={type} className={buttonClass(kind, className)} {...rest} />;
-}
-
-export function ButtonLink({ kind = 'plain', className, ...rest }: ComponentProps<typeof Link> & { readonly kind?: ButtonKind }) {
-  return <Link className={buttonClass(kind, className)} {...rest} />;
 }

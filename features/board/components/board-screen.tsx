@@ -1,4 +1,4 @@
-import { ButtonLink } from '@/components/button';
+import { ButtonLink } from '@/components/button-link';
 import type { BoardView } from '../board-view';
 import { BoardAside } from './board-aside';
 import { NotLive, ToFixLink, UndoButtons } from './board-head';

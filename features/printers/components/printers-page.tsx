@@ -1,6 +1,6 @@
 import Link from 'next/link';
 import type { ReactNode } from 'react';
-import { ButtonLink } from '@/components/button';
+import { ButtonLink } from '@/components/button-link';
 import { DeviceTable } from '@/components/device-table';
 import { EmptyState } from '@/components/empty-state';
 import { findingActionClass } from '@/components/finding-card';

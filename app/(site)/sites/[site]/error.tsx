@@ -1,13 +1,13 @@
 'use client';
 
-import { Button, ButtonLink } from '@/components/button';
+import { Button } from '@/components/button';
 import { Message } from '@/components/message';
 
 export default function ErrorPage({ reset }: { readonly error: Error; readonly reset: () => void }) {
   return (
     <Message title="This page could not be shown" words="Something broke that should not have, or the database cannot be reached. Nothing was changed, and nothing on the tills changes: tickets print as before. Try again in a moment.">
       <Button kind="primary" onClick={reset}>Try again</Button>
-      <ButtonLink href="/sites">Go to my sites</ButtonLink>
+      <Button onClick={() => location.assign('/sites')}>Go to my sites</Button>
     </Message>
   );
 }

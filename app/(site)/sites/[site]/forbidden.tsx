@@ -1,4 +1,4 @@
-import { ButtonLink } from '@/components/button';
+import { ButtonLink } from '@/components/button-link';
 import { Message } from '@/components/message';
 
 export default function Forbidden() {
