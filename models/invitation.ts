@@ -9,6 +9,7 @@ export class InvitationRow extends Model<InferAttributes<InvitationRow>, InferCr
   declare email: string;
   declare role: Role;
   declare title: CreationOptional<string>;
+  declare mayOverride: CreationOptional<boolean>;
   declare tokenHash: string;
   declare invitedBy: CreationOptional<string | null>;
   declare expiresAt: Date;
@@ -22,6 +23,7 @@ export const defineInvitationRow = (sequelize: Sequelize): void => {
     email: { type: DataTypes.STRING(254), allowNull: false },
     role: { type: DataTypes.STRING(24), allowNull: false },
     title: { type: DataTypes.STRING(80), allowNull: false, defaultValue: '' },
+    mayOverride: { type: DataTypes.BOOLEAN, allowNull: false, defaultValue: false },
     tokenHash: { type: DataTypes.STRING(64), allowNull: false },
     invitedBy: { type: DataTypes.STRING(36), allowNull: true, defaultValue: null },
     expiresAt: { type: DataTypes.DATE(3), allowNull: false },

@@ -9,6 +9,7 @@ export class MembershipRow extends Model<InferAttributes<MembershipRow>, InferCr
   declare role: Role;
   declare mayOverride: CreationOptional<boolean>;
   declare title: CreationOptional<string>;
+  declare version: CreationOptional<number>;
 }
 
 export const defineMembershipRow = (sequelize: Sequelize): void => {
@@ -18,6 +19,7 @@ export const defineMembershipRow = (sequelize: Sequelize): void => {
     role: { type: DataTypes.STRING(24), allowNull: false },
     mayOverride: { type: DataTypes.BOOLEAN, allowNull: false, defaultValue: false },
     title: { type: DataTypes.STRING(80), allowNull: false, defaultValue: '' },
+    version: { type: DataTypes.INTEGER, allowNull: false, defaultValue: 1 },
   }, { sequelize, tableName: 'memberships', underscored: true, timestamps: false });
 };
 

@@ -5,17 +5,15 @@ import { Rail } from '@/components/rail';
 import { TopBar } from '@/components/top-bar';
 import { SignInForm } from '@/features/sign-in/components/sign-in-form';
 import { WhatItDoes } from '@/features/sign-in/components/what-it-does';
+import { ownPath } from '@/lib/http/own-path';
 import { currentPerson } from '@/lib/server/current-person';
 
 export const metadata: Metadata = { title: 'Sign in' };
 
-type SignInPageProps = { readonly searchParams: Promise<{ readonly next?: string; readonly left?: string }> };
-
-/** Only a path of our own is gone back to. */
-const ownPath = (next: string | undefined): string => (next !== undefined && /^\/(?![/\\])/.test(next) ? next : '/');
+type SignInPageProps = { readonly searchParams: Promise<{ readonly next?: string; readonly left?: string; readonly changed?: string }> };
 
 export default async function SignInPage({ searchParams }: SignInPageProps) {
-  const { next, left } = await searchParams;
+  const { next, left, changed } = await searchParams;
   if (left === undefined && (await currentPerson()) !== null) redirect(ownPath(next));
   return (
     <>
@@ -26,6 +24,7 @@ export default async function SignInPage({ searchParams }: SignInPageProps) {
           <HangingPaper className="-mt-[5px] grid gap-5 px-6 pt-9 pb-7 md:px-8 md:pt-14 md:pb-9">
             <h1 className="text-[27px]">Sign in</h1>
             {left === undefined ? null : <p role="status" className="rounded-lg bg-calm-tint px-3 py-2 text-calm-text">You are signed out on this device.</p>}
+            {changed === undefined ? null : <p role="status" className="rounded-lg bg-calm-tint px-3 py-2 text-calm-text">Your password is changed and you are signed out everywhere. Sign in with the new one.</p>}
             <SignInForm next={ownPath(next)} />
             <p className="text-[13px] text-soft">No sign-in yet? The owner of your site can invite you.</p>
           </HangingPaper>

@@ -1,18 +1,13 @@
 import 'server-only';
 import { BaseError, ConnectionError, DatabaseError, ForeignKeyConstraintError, UniqueConstraintError } from 'sequelize';
 import { AppError } from '@/lib/http/errors';
-import { lastChangeOf } from './history';
 import { log } from './log';
 import { RowMissing, StaleWrite } from './versioned-update';
 
-const staleError = async (error: StaleWrite): Promise<AppError> => {
-  const { siteId } = error.current as { siteId?: string };
-  const changed = siteId === undefined ? null : await lastChangeOf(siteId, error.subjectKind, error.subjectId);
-  const who = changed === null ? 'Somebody else' : changed.by;
-  return new AppError('stale', `${who} changed this since you opened it${changed === null ? '' : `: ${changed.summary}`}. Nothing of yours was saved, and nothing you typed is lost. Look at what changed, then save again.`, {
-    changed, current: error.current,
+const staleError = ({ lastChange: changed, current }: StaleWrite): AppError =>
+  new AppError('stale', `${changed === null ? 'Somebody else' : changed.by} changed this since you opened it${changed === null ? '' : `: ${changed.summary}`}. Nothing of yours was saved, and nothing you typed is lost. Look at what changed, then save again.`, {
+    changed, current,
   });
-};
 
 const isDown = (error: BaseError): boolean =>
   error instanceof ConnectionError || (error instanceof DatabaseError && /ECONNREFUSED|connection|socket/i.test(error.message));

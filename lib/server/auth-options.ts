@@ -2,8 +2,10 @@ import 'server-only';
 import type { NextAuthOptions } from 'next-auth';
 import Credentials from 'next-auth/providers/credentials';
 import { env } from '@/lib/env';
+import { addressOf } from './address-of';
 import { checkSignIn } from './check-sign-in';
-import { startSession, type SessionClaims } from './session';
+import { endSession, startSession, type SessionClaims } from './session';
+import { fortnightSeconds } from './session-cookie';
 
 declare module 'next-auth' {
   interface Session { claims?: SessionClaims }
@@ -15,11 +17,8 @@ declare module 'next-auth/jwt' {
 
 const headerOf = (headers: unknown, name: string): string => {
   const value = (headers as Record<string, string | string[] | undefined> | undefined)?.[name];
-  return (Array.isArray(value) ? value[0] : value) ?? '';
+  return (Array.isArray(value) ? value.join(',') : value) ?? '';
 };
-
-/** A fortnight: long enough for a tablet at the pass, and any session can be ended sooner. */
-const fortnightSeconds = 14 * 24 * 60 * 60;
 
 export const authOptions = (): NextAuthOptions => ({
   secret: env().NEXTAUTH_SECRET,
@@ -29,7 +28,7 @@ export const authOptions = (): NextAuthOptions => ({
     Credentials({
       credentials: { email: {}, password: {} },
       authorize: async (credentials, request) => {
-        const from = headerOf(request.headers, 'x-forwarded-for').split(',')[0]?.trim() ?? '';
+        const from = addressOf(headerOf(request.headers, 'x-forwarded-for'));
         const result = await checkSignIn(credentials?.email ?? '', credentials?.password ?? '', from);
         if (result.kind === 'wait') throw new Error(`wait-${result.seconds}`);
         if (result.kind === 'wrong') return null;
@@ -37,6 +36,11 @@ export const authOptions = (): NextAuthOptions => ({
       },
     }),
   ],
+  events: {
+    signOut: async ({ token }) => {
+      if (token.claims !== undefined) await endSession(token.claims.sessionId);
+    },
+  },
   callbacks: {
     jwt: ({ token, user }) => (user?.claims === undefined ? token : { ...token, claims: user.claims }),
     session: ({ session, token }) => ({ expires: session.expires, ...(token.claims === undefined ? {} : { claims: token.claims }) }),

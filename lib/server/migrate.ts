@@ -1,9 +1,13 @@
 import { DataTypes, type Sequelize } from 'sequelize';
 import { SequelizeStorage, Umzug } from 'umzug';
 import * as firstTables from '@/migrations/20261201090000-first-tables';
+import * as peopleAtTheSameTime from '@/migrations/20261202090000-people-at-the-same-time';
 
 /** Every migration by its file's name, oldest first; a list, so that the build and the bundler see them all. */
-const migrations = [{ name: '20261201090000-first-tables', ...firstTables }];
+const migrations = [
+  { name: '20261201090000-first-tables', ...firstTables },
+  { name: '20261202090000-people-at-the-same-time', ...peopleAtTheSameTime },
+];
 
 const umzugFor = (sequelize: Sequelize) => {
   const queryInterface = sequelize.getQueryInterface();

@@ -58,3 +58,9 @@ export const readBody = async (request: Request, { json, maxBytes, types }: Limi
     throw new AppError('invalid', 'What was sent is not JSON, so nothing was changed.');
   }
 };
+
+/** What a plain form of ours sends: a few short fields. */
+export const readForm = async (request: Request): Promise<URLSearchParams> => {
+  const { bytes } = await readBody(request, { json: false, maxBytes: 10_000, types: ['application/x-www-form-urlencoded'] });
+  return new URLSearchParams(new TextDecoder().decode(bytes));
+};

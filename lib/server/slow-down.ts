@@ -1,32 +1,48 @@
 import 'server-only';
 import { RateLimiterMemory, RateLimiterRes } from 'rate-limiter-flexible';
 
-/** Wrong passwords: five for one account in a quarter of an hour, fifty from one address. */
-const perAccount = new RateLimiterMemory({ keyPrefix: 'account', points: 5, duration: 15 * 60 });
-const perAddress = new RateLimiterMemory({ keyPrefix: 'address', points: 50, duration: 15 * 60 });
+const quarterHourSeconds = 15 * 60;
 
-const accountKey = (email: string): string => email.trim().toLowerCase().slice(0, 254);
-
-/** Seconds to wait before another try is looked at; 0 when it may be made now. */
-export const secondsToWait = async (email: string, address: string): Promise<number> => {
-  const states = await Promise.all([perAccount.get(accountKey(email)), perAddress.get(address)]);
-  const [account, from] = states;
-  const waits = [account !== null && account.consumedPoints >= perAccount.points ? account.msBeforeNext : 0, from !== null && from.consumedPoints >= perAddress.points ? from.msBeforeNext : 0];
-  return Math.ceil(Math.max(...waits) / 1000);
+/**
+ * Tries in a quarter of an hour. The first limit is for who guesses from one place, and leaves the person themselves in
+ * from another; the second for who guesses from many places; the third for who goes through many accounts.
+ */
+const limiters = {
+  accountFromAddress: new RateLimiterMemory({ keyPrefix: 'account-from-address', points: 5, duration: quarterHourSeconds }),
+  account: new RateLimiterMemory({ keyPrefix: 'account', points: 30, duration: quarterHourSeconds }),
+  address: new RateLimiterMemory({ keyPrefix: 'address', points: 50, duration: quarterHourSeconds }),
 };
 
-const countOne = async (limiter: RateLimiterMemory, key: string): Promise<void> => {
+type Try = { readonly email: string; readonly address: string };
+
+const keysOf = ({ email, address }: Try): Readonly<Record<keyof typeof limiters, string>> => ({ accountFromAddress: JSON.stringify([email, address]), account: email, address });
+
+/** Seconds to wait; 0 when this one may still be made. */
+const consume = async (limiter: RateLimiterMemory, key: string): Promise<number> => {
   try {
     await limiter.consume(key);
+    return 0;
   } catch (error) {
-    if (!(error instanceof RateLimiterRes)) throw error;
+    if (error instanceof RateLimiterRes) return Math.ceil(error.msBeforeNext / 1000);
+    throw error;
   }
 };
 
-export const countWrongPassword = async (email: string, address: string): Promise<void> => {
-  await Promise.all([countOne(perAccount, accountKey(email)), countOne(perAddress, address)]);
+/**
+ * Counts a try before its password is looked at, so that tries sent all at once count as well.
+ *
+ * @returns seconds to wait before a password is looked at; 0 when this one may be
+ */
+export const countTry = async (made: Try): Promise<number> => {
+  const keys = keysOf(made);
+  const waits = await Promise.all([
+    consume(limiters.accountFromAddress, keys.accountFromAddress), consume(limiters.account, keys.account), consume(limiters.address, keys.address),
+  ]);
+  return Math.max(...waits);
 };
 
-export const forgetWrongPasswords = async (email: string): Promise<void> => {
-  await perAccount.delete(accountKey(email));
+/** The right password was no guess: it does not count, and the wrong ones before it from there are forgotten. */
+export const forgiveTries = async (made: Try): Promise<void> => {
+  const keys = keysOf(made);
+  await Promise.all([limiters.accountFromAddress.delete(keys.accountFromAddress), limiters.account.reward(keys.account), limiters.address.reward(keys.address)]);
 };

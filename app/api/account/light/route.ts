@@ -1,7 +1,8 @@
 import { z } from 'zod';
-import { mustBeSameOrigin } from '@/lib/server/read-request';
-import { asAppError } from '@/lib/server/as-app-error';
+import { ownPath } from '@/lib/http/own-path';
 import { problemResponse } from '@/lib/http/problem';
+import { asAppError } from '@/lib/server/as-app-error';
+import { mustBeSameOrigin, readForm } from '@/lib/server/read-request';
 
 const choice = z.enum(['system', 'light', 'low']);
 
@@ -9,11 +10,9 @@ const choice = z.enum(['system', 'light', 'low']);
 export const POST = async (request: Request): Promise<Response> => {
   try {
     mustBeSameOrigin(request);
-    const form = await request.formData();
+    const form = await readForm(request);
     const light = choice.catch('system').parse(form.get('light'));
-    const back = String(form.get('back') ?? '/');
-    const target = back.startsWith('/') && !back.startsWith('//') && !back.includes('\\') ? back : '/';
-    return new Response(null, { status: 303, headers: { Location: target, 'Set-Cookie': `light=${light}; Path=/; Max-Age=31536000; SameSite=Lax` } });
+    return new Response(null, { status: 303, headers: { Location: ownPath(form.get('back')), 'Set-Cookie': `light=${light}; Path=/; Max-Age=31536000; SameSite=Lax` } });
   } catch (error) {
     return problemResponse(await asAppError(error));
   }
