@@ -69,7 +69,7 @@ export type ImportRequest = { readonly bytes: Uint8Array; readonly mapping: stri
  * Looks at a file without changing anything, or applies it whole: only when it has no error, and only to the menu that the
  * dry run looked at.
  */
-export const importMenu = (actor: Actor, { bytes, mapping: given, apply }: ImportRequest): Promise<DryRun> => {
+export const importMenu = async (actor: Actor, { bytes, mapping: given, apply }: ImportRequest): Promise<DryRun> => {
   const table = readUpload(bytes);
   return actIn(actor, 'menu.write', async (transaction) => {
     const { siteId } = actor;
