@@ -2,41 +2,61 @@
 
 import { useState, type FormEvent } from 'react';
 import { Button } from '@/components/button';
-import { sendNewPassword } from '../api/password';
+import { PasswordField } from '@/components/form/password-field';
+import { faultOfNewPassword, shortestPassword, type PasswordOwner } from '@/lib/domain/people/new-password';
+import { ProblemError } from '@/lib/http/client';
+import type { Problem } from '@/lib/http/problem';
+import { changePassword } from '../api/change-password';
 
-const input = 'min-h-12 w-full rounded-md border border-line-strong bg-raised px-3 text-[16px] text-ink';
+/** What the server would say of it anyway, said without asking. */
+const faultAtOnce = (wanted: string, owner: PasswordOwner): Problem['fields'] => {
+  const reason = faultOfNewPassword(wanted, owner);
+  return reason === null ? undefined : [{ field: 'wanted', reason }];
+};
 
-/** Two passwords and what follows from pressing the button, said before it. */
-export function PasswordForm() {
-  const [refused, setRefused] = useState('');
+/** One's own password. Every other device has to sign in again. */
+export function PasswordForm({ owner }: { readonly owner: PasswordOwner }) {
+  const [fields, setFields] = useState<Problem['fields']>();
+  const [said, setSaid] = useState<{ readonly words: string; readonly done: boolean } | null>(null);
   const [waiting, setWaiting] = useState(false);
+  const reasonFor = (field: string): string | undefined => fields?.find((one) => one.field === field)?.reason;
+
   const submit = async (event: FormEvent<HTMLFormElement>): Promise<void> => {
     event.preventDefault();
-    const form = new FormData(event.currentTarget);
+    if (waiting) return;
+    const form = event.currentTarget;
+    const typed = new FormData(form);
+    const input = { current: String(typed.get('current')), wanted: String(typed.get('wanted')) };
+    const refuse = (reasons: Problem['fields']): void => {
+      setFields(reasons);
+      form.querySelector<HTMLInputElement>(`#${reasons?.[0]?.field ?? 'current'}`)?.focus();
+    };
+    const fault = faultAtOnce(input.wanted, owner);
+    setSaid(null);
+    if (fault !== undefined) return refuse(fault);
+    setFields(undefined);
     setWaiting(true);
     try {
-      await sendNewPassword(String(form.get('current')), String(form.get('next')));
-      location.assign('/sign-in?changed=1');
+      await changePassword(input);
+      form.reset();
+      setSaid({ words: 'Your password is changed. Every other device has to sign in again; this one stays signed in.', done: true });
     } catch (error) {
-      const fields = (error as { problem?: { fields?: readonly { reason: string }[] } }).problem?.fields ?? [];
-      setRefused([(error as Error).message, ...fields.map((field) => field.reason)].join(' '));
+      if (!(error instanceof ProblemError)) throw error;
+      if (error.problem.fields === undefined) setSaid({ words: error.problem.detail, done: false });
+      else refuse(error.problem.fields);
+    } finally {
       setWaiting(false);
     }
   };
+
   return (
-    <form method="post" onSubmit={(event) => void submit(event)} className="grid max-w-[420px] gap-4">
-      <div className="grid gap-1">
-        <label htmlFor="current" className="text-[13.5px] font-semibold text-soft">Present password</label>
-        <input id="current" name="current" type="password" autoComplete="current-password" required className={input} />
-      </div>
-      <div className="grid gap-1">
-        <label htmlFor="next" className="text-[13.5px] font-semibold text-soft">New password</label>
-        <input id="next" name="next" type="password" autoComplete="new-password" required minLength={8} maxLength={256} aria-describedby="next-hint" className={input} />
-        <p id="next-hint" className="text-[12.5px] text-quiet">At least 8 characters. Three words that belong to nothing are better than one with a number.</p>
-      </div>
-      <p role="alert" className="rounded-lg bg-hot-tint px-3 py-2 text-hot-text empty:hidden">{refused}</p>
-      <p className="text-[13.5px] text-soft">You are signed out everywhere, on this device too, and sign in again with the new one.</p>
-      <Button type="submit" kind="primary" disabled={waiting} className="min-h-12 text-[16px]">Change my password</Button>
+    <form method="post" noValidate onSubmit={(event) => void submit(event)} className="grid max-w-[420px] gap-4">
+      <input type="hidden" name="username" autoComplete="username" value={owner.email} readOnly />
+      <PasswordField id="current" name="current" label="Password now" autoComplete="current-password" required error={reasonFor('current')} />
+      <PasswordField id="wanted" name="wanted" label="New password" autoComplete="new-password" required hint={`At least ${shortestPassword} characters. A few words in a row do well.`} error={reasonFor('wanted')} />
+      <p role="alert" className="rounded-lg border border-hot bg-hot-tint px-3 py-2 font-semibold text-hot-text empty:hidden">{said?.done === false ? said.words : null}</p>
+      <p role="status" className="rounded-lg bg-calm-tint px-3 py-2 text-calm-text empty:hidden">{said?.done === true ? said.words : null}</p>
+      <div><Button type="submit" kind="primary" aria-disabled={waiting} className="min-h-12">{waiting ? 'Changing it' : 'Change my password'}</Button></div>
     </form>
   );
 }
