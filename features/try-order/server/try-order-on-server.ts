@@ -6,7 +6,7 @@ import { mustBeAllowed, type Actor } from '@/lib/server/actor';
 import { loadSite } from '@/lib/server/site-snapshot';
 import { planChoices, planOfKey } from '../plan-choices';
 import type { TryOrderInput } from '../schema';
-import { readLivePlan } from './read-live-plan';
+import { readLivePlan } from '@/lib/server/read-live-plan';
 
 /** Tries an order with the engine that the browser uses, on the site as the database has it now. Nothing is written. */
 export const tryOrderOnServer = async ({ membership, siteId, plan: key, present, order, time }: Actor & TryOrderInput): Promise<TriedOrder> => {

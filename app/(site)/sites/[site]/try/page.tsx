@@ -1,6 +1,6 @@
 import type { Metadata } from 'next';
 import { TryOrderPage } from '@/features/try-order/components/try-order-page';
-import { readLivePlan } from '@/features/try-order/server/read-live-plan';
+import { readLivePlan } from '@/lib/server/read-live-plan';
 import { openSite } from '@/lib/server/page-access';
 
 export const metadata: Metadata = { title: 'Try an order' };
