@@ -79,6 +79,17 @@ test('a finding shows its example as an order, and its way on paper', async ({ p
   await expect(page.getByText(/has no rule that sends it to a station/).first()).toBeVisible();
 });
 
+test('an owner closes a gap that the fault drill shows with the press that it offers', async ({ page }) => {
+  await signIn(page, 'owner');
+  await page.goto(`${sitePage('owner', 'proof')}?plan=dinner`);
+  await expect(page.getByText('10 items would print nowhere').first()).toBeVisible();
+  const drill = page.getByRole('table', { name: 'Single points of failure' });
+  const bar = drill.getByRole('row').filter({ has: page.getByRole('rowheader', { name: 'BAR1 Printer down' }) });
+  await expect(bar).toContainText('61 lost');
+  await bar.getByRole('button', { name: /back it up$/ }).click();
+  await expect(drill.getByRole('rowheader', { name: 'BAR1 Printer down' })).toHaveCount(0);
+});
+
 test('each person finds the handful of pages that are theirs', async ({ page }) => {
   await signIn(page, 'installer');
   await page.goto(sitePage('installer', 'board'));
