@@ -56,6 +56,7 @@ export function PasswordForm({ owner }: { readonly owner: PasswordOwner }) {
       <PasswordField id="wanted" name="wanted" label="New password" autoComplete="new-password" required hint={`At least ${shortestPassword} characters. A few words in a row do well.`} error={reasonFor('wanted')} />
       <p role="alert" className="rounded-lg border border-hot bg-hot-tint px-3 py-2 font-semibold text-hot-text empty:hidden">{said?.done === false ? said.words : null}</p>
       <p role="status" className="rounded-lg bg-calm-tint px-3 py-2 text-calm-text empty:hidden">{said?.done === true ? said.words : null}</p>
+      <p className="text-[13.5px] text-soft">Every other device that is signed in as you has to sign in again.</p>
       <div><Button type="submit" kind="primary" aria-disabled={waiting} className="min-h-12">{waiting ? 'Changing it' : 'Change my password'}</Button></div>
     </form>
   );

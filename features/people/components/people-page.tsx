@@ -13,7 +13,7 @@ import { InvitationButtons } from './invitation-buttons';
 const counted = (count: number, one: string, many: string): string => `${count} ${count === 1 ? one : many}`;
 
 const saySize = ({ members, invitations }: PeopleView): string =>
-  [counted(members.length, 'person works here', 'people work here'), ...(invitations.length === 0 ? [] : [`${counted(invitations.length, 'invitation', 'invitations')} not answered yet`])].join(', ');
+  [counted(members.length, 'person', 'people'), ...(invitations.length === 0 ? [] : [`${counted(invitations.length, 'invitation', 'invitations')} not answered yet`])].join(', ');
 
 function Standing({ role, title, mayOverride }: Pick<Member, 'role' | 'title' | 'mayOverride'>) {
   return (

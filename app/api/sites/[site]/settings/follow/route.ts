@@ -1,0 +1,8 @@
+import { followInput, siteParams } from '@/features/site-settings/schema';
+import { savePart } from '@/features/site-settings/server/save-part';
+import { route } from '@/lib/server/route';
+
+export const PUT = route(
+  { permission: 'site.settings', params: siteParams, body: followInput, ifMatch: true },
+  ({ body, version, ...actor }) => savePart(actor, 'follow', { version, values: body }),
+);

@@ -1,0 +1,8 @@
+import { linkInput, siteParams } from '@/features/site-settings/schema';
+import { savePart } from '@/features/site-settings/server/save-part';
+import { route } from '@/lib/server/route';
+
+export const PUT = route(
+  { permission: 'network.write', params: siteParams, body: linkInput, ifMatch: true },
+  ({ body, version, ...actor }) => savePart(actor, 'link', { version, values: body }),
+);
