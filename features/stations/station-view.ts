@@ -1,40 +1,37 @@
+import type { Dependents } from '@/lib/domain/checks/dependents';
+import type { Printer } from '@/lib/domain/site/printer';
 import type { Site } from '@/lib/domain/site/site';
 import type { Station } from '@/lib/domain/site/station';
-import { suggestCode } from '@/lib/domain/stations/codes';
-import type { StationInput } from './schema';
+import { dependentsOfStation } from '@/lib/domain/stations/dependents-of-station';
 
-/** What the form of one station needs: itself, its neighbours, and the printers to choose from. */
+export type PrinterChoice = {
+  readonly id: Printer['id'];
+  readonly name: string;
+  /** Its address, or the till it hangs on; that it is down comes first. */
+  readonly where: string;
+};
+
+/** What the panel of one station needs, as plain data; `station` is null for one that is being added. */
 export type StationView = {
   readonly siteId: string;
-  /** Null for a new one. */
   readonly station: Station | null;
-  readonly others: readonly Station[];
-  readonly printers: readonly { readonly id: string; readonly name: string }[];
-  /** Plans whose rules send to it, by name. */
-  readonly usedBy: readonly string[];
+  readonly stations: readonly Station[];
+  readonly printers: readonly PrinterChoice[];
+  readonly dependents: Dependents;
+  readonly mayWrite: boolean;
 };
 
-export const viewStation = (site: Site, station: Station | null): StationView => ({
-  siteId: site.id, station,
-  others: site.stations.filter((one) => one.id !== station?.id),
-  printers: site.printers.map(({ id, name }) => ({ id, name })),
-  usedBy: station === null ? [] : site.plans.filter((plan) => plan.rules.some((rule) => rule.stations.includes(station.id))).map((plan) => plan.name),
-});
-
-export const inputOfStation = (station: Station): StationInput => ({
-  name: station.name, code: station.code, kind: station.kind, mesh: station.mesh, colour: station.colour, printers: [...station.printers], open: station.open,
-  standIn: station.standIn, layout: station.layout, ticketsPerSending: station.ticketsPerSending, pace: station.pace,
-});
-
-export const newStationInput = (others: readonly Station[]): StationInput => ({
-  name: '', code: suggestCode('', others) ?? '', kind: 'prep', mesh: 'square', colour: 'brick', printers: [], open: true, standIn: null, layout: 'by-course', ticketsPerSending: 1, pace: null,
-});
-
-export const meshWords: Readonly<Record<Station['mesh'], string>> = {
-  square: 'Square weave', diagonal: 'Diagonal', dots: 'Dots', bars: 'Bars', diamond: 'Diamond', lines: 'Lines', rings: 'Rings', chevron: 'Chevron', brick: 'Brickwork', grain: 'Grain',
+const whereOf = (printer: Printer, site: Site): string => {
+  const host = site.tills.find((till) => till.id === printer.hostTill)?.name;
+  const place = printer.connection === 'network' ? printer.address || 'no address yet' : `on ${host ?? 'no till yet'}`;
+  return printer.downSince === null ? place : `down, ${place}`;
 };
-export const colourWords: Readonly<Record<Station['colour'], string>> = {
-  brick: 'Brick', slate: 'Slate blue', aubergine: 'Aubergine', mustard: 'Mustard', pine: 'Pine', iron: 'Iron', plum: 'Plum', moss: 'Moss', rust: 'Rust', harbour: 'Harbour blue',
-};
-export const kindWords: Readonly<Record<Station['kind'], string>> = { prep: 'Cooks', pass: 'Checks and sends out' };
-export const layoutWords: Readonly<Record<Station['layout'], string>> = { 'by-course': 'Dishes by course', 'by-seat': 'Every seat in turn' };
+
+export const viewStation = (site: Site, station: Station | null, mayWrite: boolean): StationView => ({
+  siteId: site.id,
+  station,
+  stations: site.stations,
+  printers: site.printers.map((printer) => ({ id: printer.id, name: printer.name, where: whereOf(printer, site) })),
+  dependents: station === null ? { obstacles: [], consequences: [] } : dependentsOfStation(site, station.id),
+  mayWrite,
+});

@@ -1,17 +1,19 @@
 import type { KeyboardEvent } from 'react';
+import { controlClass } from '@/components/form/field';
+import type { PrinterChoice } from '../station-view';
 
 type PrinterOrderProps = {
-  readonly printers: readonly { readonly id: string; readonly name: string }[];
+  readonly printers: readonly PrinterChoice[];
   readonly chosen: readonly string[];
-  readonly disabled: boolean;
-  readonly change: (chosen: readonly string[]) => void;
+  readonly change: (chosen: string[]) => void;
+  readonly error?: string | undefined;
 };
 
-const small = 'min-h-8 rounded px-2 text-[12.5px] font-semibold underline underline-offset-3 disabled:opacity-40 disabled:no-underline';
+const small = 'min-h-8 rounded px-1.5 text-[12.5px] font-semibold underline underline-offset-3 disabled:no-underline disabled:opacity-40 pointer-coarse:min-h-11';
 
-/** The printers of a station in the order they are tried; the first that is up and in reach prints. */
-export function PrinterOrder({ printers, chosen, disabled, change }: PrinterOrderProps) {
-  const nameOf = (id: string): string => printers.find((printer) => printer.id === id)?.name ?? id;
+/** The printers of a station in the order they are tried: the first that is up and in reach prints. */
+export function PrinterOrder({ printers, chosen, change, error }: PrinterOrderProps) {
+  const nameOf = (id: string): string => printers.find((printer) => printer.id === id)?.name ?? 'A printer that is gone';
   const left = printers.filter((printer) => !chosen.includes(printer.id));
   const move = (index: number, to: number): void => {
     const moved = chosen[index];
@@ -23,27 +25,28 @@ export function PrinterOrder({ printers, chosen, disabled, change }: PrinterOrde
     move(index, index + (event.key === 'ArrowUp' ? -1 : 1));
   };
   return (
-    <fieldset disabled={disabled} className="grid gap-1.5">
+    <fieldset className="grid gap-1.5">
       <legend className="mb-1 text-[12.5px] font-semibold text-soft">Printers, in the order they are tried</legend>
-      {chosen.length === 0 ? <p className="text-[13px] font-semibold text-hot-text">None: everything sent here would be lost.</p> : null}
-      <ol className="grid gap-1">
-        {chosen.map((id, index) => (
-          <li key={id} onKeyDown={onKeyDown(index)} className="flex items-center gap-1 rounded-md border border-line bg-raised px-2.5 py-1">
-            <span className="flex-1 font-mono font-semibold">{index + 1}. {nameOf(id)}</span>
-            <button type="button" className={small} disabled={index === 0} onClick={() => move(index, index - 1)} aria-label={`Try ${nameOf(id)} earlier`}>Earlier</button>
-            <button type="button" className={small} disabled={index === chosen.length - 1} onClick={() => move(index, index + 1)} aria-label={`Try ${nameOf(id)} later`}>Later</button>
-            <button type="button" className={small} onClick={() => change(chosen.filter((one) => one !== id))} aria-label={`Take out ${nameOf(id)}`}>Take out</button>
-          </li>
-        ))}
-      </ol>
-      {left.length === 0 ? null : (
-        <label className="grid gap-1 text-[12.5px] font-semibold text-soft">Add a printer
-          <select value="" onChange={(event) => change([...chosen, event.target.value])} className="min-h-10 rounded-md border border-line-strong bg-raised px-2.5 text-[14px] font-normal text-ink">
-            <option value="">Choose one</option>
-            {left.map((printer) => <option key={printer.id} value={printer.id}>{printer.name}</option>)}
-          </select>
-        </label>
+      {chosen.length === 0 ? null : (
+        <ol className="grid gap-1">
+          {chosen.map((id, index) => (
+            <li key={id} onKeyDown={onKeyDown(index)} className="flex flex-wrap items-center gap-x-1 rounded-md border border-line bg-raised py-1 pr-1.5 pl-2.5">
+              <span className="min-w-0 flex-1"><span className="mr-2 text-quiet">{index + 1}</span><b className="font-mono">{nameOf(id)}</b> <span className="ml-1 font-mono text-[12.5px] text-quiet">{printers.find((printer) => printer.id === id)?.where}</span></span>
+              <button type="button" className={small} disabled={index === 0} onClick={() => move(index, index - 1)} aria-label={`Try ${nameOf(id)} earlier`}>Earlier</button>
+              <button type="button" className={small} disabled={index === chosen.length - 1} onClick={() => move(index, index + 1)} aria-label={`Try ${nameOf(id)} later`}>Later</button>
+              <button type="button" className={small} onClick={() => change(chosen.filter((one) => one !== id))} aria-label={`Take out ${nameOf(id)}`}>Take out</button>
+            </li>
+          ))}
+        </ol>
       )}
+      {left.length === 0 ? null : (
+        <select value="" aria-label="Add a printer" onChange={(event) => change([...chosen, event.target.value])} className={controlClass}>
+          <option value="">{chosen.length === 0 ? 'Choose a printer' : 'Add one for when these are out'}</option>
+          {left.map((printer) => <option key={printer.id} value={printer.id}>{printer.name}, {printer.where}</option>)}
+        </select>
+      )}
+      {printers.length === 0 ? <p className="text-[12.5px] text-quiet">No printers are written down for this site yet. The owner or the installer does that.</p> : null}
+      {error === undefined ? null : <p className="text-[12.5px] font-semibold text-hot-text">{error}</p>}
     </fieldset>
   );
 }

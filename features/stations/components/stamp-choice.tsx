@@ -7,24 +7,29 @@ type StampChoiceProps<Value extends string> = {
   readonly values: readonly Value[];
   readonly words: Readonly<Record<Value, string>>;
   readonly chosen: Value;
-  readonly disabled: boolean;
+  /** Which stations have a value already, in words; empty when none has. */
+  readonly takenBy: (value: Value) => string;
   readonly draw: (value: Value) => { readonly code: string; readonly mesh: Mesh; readonly colour: StationColour };
   readonly choose: (value: Value) => void;
 };
 
-/** Chooses a mesh or a colour by the stamp it makes; the words say it to those who do not see it. */
-export function StampChoice<Value extends string>({ legend, name, values, words, chosen, disabled, draw, choose }: StampChoiceProps<Value>) {
+/** Chooses a mesh or a colour by the stamp it makes; what another station has is dimmed and says whose it is. */
+export function StampChoice<Value extends string>({ legend, name, values, words, chosen, takenBy, draw, choose }: StampChoiceProps<Value>) {
+  const owner = takenBy(chosen);
   return (
-    <fieldset disabled={disabled}>
-      <legend className="mb-1 text-[12.5px] font-semibold text-soft">{legend}: {words[chosen]}</legend>
-      <div className="flex flex-wrap gap-1.5">
-        {values.map((value) => (
-          <label key={value} title={words[value]} className="rounded-[10px] border-2 border-transparent p-0.5 has-checked:border-ink has-focus-visible:outline-2 has-focus-visible:outline-ink">
-            <input type="radio" name={name} value={value} checked={value === chosen} onChange={() => choose(value)} className="sr-only" />
-            <Stamp {...draw(value)} size="medium" />
-            <span className="sr-only">{words[value]}</span>
-          </label>
-        ))}
+    <fieldset className="grid gap-1">
+      <legend className="mb-1 text-[12.5px] text-soft"><span className="font-semibold">{legend}:</span> {words[chosen].toLowerCase()}{owner === '' ? '' : `, as ${owner}`}</legend>
+      <div className="flex flex-wrap gap-x-1.5 gap-y-1">
+        {values.map((value) => {
+          const taken = takenBy(value);
+          return (
+            <label key={value} title={taken === '' ? words[value] : `${words[value]}: ${taken}`} className="cursor-pointer rounded-[9px] border-2 border-transparent p-[3px] hover:border-line-strong has-checked:border-ink has-focus-visible:outline-2 has-focus-visible:outline-offset-1 has-focus-visible:outline-ink">
+              <input type="radio" name={name} value={value} checked={value === chosen} onChange={() => choose(value)} className="sr-only" />
+              <span className={taken === '' || value === chosen ? '' : 'opacity-40'}><Stamp {...draw(value)} size="small" /></span>
+              <span className="sr-only">{words[value]}{taken === '' ? '' : `, ${taken} has it`}</span>
+            </label>
+          );
+        })}
       </div>
     </fieldset>
   );

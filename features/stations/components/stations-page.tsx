@@ -1,5 +1,5 @@
-import type { ReactNode } from 'react';
 import Link from 'next/link';
+import type { ReactNode } from 'react';
 import { ButtonLink } from '@/components/button-link';
 import { DeviceTable } from '@/components/device-table';
 import { EmptyState } from '@/components/empty-state';
@@ -7,47 +7,73 @@ import { findingActionClass } from '@/components/finding-card';
 import { PageHead } from '@/components/page-head';
 import { Stamp } from '@/components/stamp';
 import { Tag } from '@/components/tag';
-import type { Site } from '@/lib/domain/site/site';
-import { kindWords, layoutWords } from '../station-view';
+import type { Finding } from '@/lib/domain/findings/finding';
+import { kindWords, ticketWords } from '@/lib/domain/stations/station-words';
+import type { StationRow, StationsOverview } from '../station-rows';
 
-type StationsPageProps = { readonly site: Site; readonly mayWrite: boolean; readonly panel: ReactNode };
+type StationsPageProps = {
+  readonly siteId: string;
+  readonly overview: StationsOverview;
+  readonly mayWrite: boolean;
+  /** Draws findings with their fixes. */
+  readonly findings: (findings: readonly Finding[]) => ReactNode;
+  /** The panel that is open, if one is. */
+  readonly panel: ReactNode;
+};
 
-/** All stations of a site in their order: what each is, where it prints, and who stands in. */
-export function StationsPage({ site, mayWrite, panel }: StationsPageProps) {
-  const href = (query: string): string => `/sites/${site.id}/stations?${query}`;
-  const printerNames = new Map(site.printers.map((printer) => [printer.id, printer.name]));
-  const names = new Map(site.stations.map((station) => [station.id, station.name]));
-  const closed = site.stations.filter((station) => !station.open).length;
-  const silent = site.stations.filter((station) => station.printers.length === 0).length;
-  const said = [closed === 0 ? 'All are open.' : `${closed} closed.`, silent === 0 ? '' : `${silent} without a printer.`].filter((words) => words !== '').join(' ');
+/** As tall as the stamp at the start of the line, so that the words stand on one line with it. */
+function Cell({ children, wide = false }: { readonly children: ReactNode; readonly wide?: boolean }) {
+  return <span className={`inline-block py-1.5 align-top leading-5 ${wide ? 'max-w-[34ch]' : ''}`}>{children}</span>;
+}
+
+function Name({ row: { station } }: { readonly row: StationRow }) {
+  return (
+    <span className="flex items-center gap-2.5">
+      <Stamp code={station.code} mesh={station.mesh} colour={station.colour} size="small" />
+      <span className="leading-tight"><b>{station.name}</b><span className="sr-only">, code {station.code}</span><span className="block text-[12px] text-quiet">{kindWords[station.kind]}</span></span>
+    </span>
+  );
+}
+
+function Printers({ row }: { readonly row: StationRow }) {
+  if (row.printers.length === 0) return <Tag tone="hot">No printer</Tag>;
+  return row.printers.map((name, index) => <span key={name}>{index === 0 ? '' : ', then '}<span className="font-mono font-semibold">{name}</span></span>);
+}
+
+/** All stations of a site in their order. A line reads as a sentence: Grill, cooks these, prints there. */
+export function StationsPage({ siteId, overview, mayWrite, findings, panel }: StationsPageProps) {
+  const href = (query: string): string => `/sites/${siteId}/stations?${query}`;
+  const { rows, plan } = overview;
+  const cooks = plan === null ? 'Cooks' : `Cooks in ${plan}`;
   return (
     <>
-      <PageHead title={`${site.stations.length} stations`} sub={site.stations.length === 0 ? undefined : said}>
-        {mayWrite && site.stations.length > 1 ? <ButtonLink href={href('order=yes')} scroll={false}>Put in order</ButtonLink> : null}
+      <PageHead title={overview.verdict} sub={overview.said === '' ? undefined : overview.said}>
+        {mayWrite && rows.length > 1 ? <ButtonLink href={href('order=all')} scroll={false}>Put in order</ButtonLink> : null}
         {mayWrite ? <ButtonLink kind="primary" href={href('add=station')} scroll={false}>Add a station</ButtonLink> : null}
       </PageHead>
       <div className="grid gap-4 px-4 py-4 md:px-[22px]">
-        {site.stations.length === 0 ? (
+        <h2 className="sr-only">Stations</h2>
+        {rows.length === 0 ? (
           <EmptyState title="No stations yet" words="A station is where work is done: a grill, a larder, a bar, and the pass where orders are checked. Write them down, then hang menu sections on them.">
             {mayWrite ? <ButtonLink href={href('add=station')} scroll={false}>Write down the first one</ButtonLink> : null}
           </EmptyState>
         ) : (
           <DeviceTable
             caption="Stations"
-            columns={['Station', 'What it does', 'Printers', 'Stand-in', 'Ticket', 'Pace', 'Now', '']}
-            rows={site.stations.map((station) => ({
-              id: station.id,
-              name: <span className="flex items-center gap-2.5"><Stamp code={station.code} mesh={station.mesh} colour={station.colour} size="small" /><b>{station.name}</b></span>,
+            columns={['Station', cooks, 'Prints on', 'Stand-in', 'Ticket', 'Pace', 'Now', '']}
+            rows={rows.map((row) => ({
+              id: row.station.id,
+              name: <Name row={row} />,
               cells: [
-                kindWords[station.kind],
-                station.printers.length === 0 ? <Tag key="none" tone="hot">Prints nowhere</Tag> : <span key="printers" className="font-mono">{station.printers.map((printer) => printerNames.get(printer)).join(', then ')}</span>,
-                station.standIn === null ? 'None' : names.get(station.standIn) ?? '',
-                `${layoutWords[station.layout]}${station.ticketsPerSending === 1 ? '' : `, ${station.ticketsPerSending} times`}`,
-                station.pace === null ? '' : `${station.pace} in 15 minutes`,
-                station.open ? <Tag key="open" tone="calm">Open</Tag> : <Tag key="open" tone="look">Closed</Tag>,
-                <Link key="edit" href={href(`station=${encodeURIComponent(station.id)}`)} scroll={false} className={findingActionClass}>{mayWrite ? 'Edit' : 'Look'}<span className="sr-only"> {station.name}</span></Link>,
+                <Cell key="cooks" wide>{row.cooks === '' ? <span className="text-quiet">Nothing hangs there</span> : row.cooks}</Cell>,
+                <Cell key="printers"><Printers row={row} /></Cell>,
+                <Cell key="stand-in">{row.standIn === '' ? <span className="text-quiet">None</span> : row.standIn}</Cell>,
+                <Cell key="ticket">{ticketWords(row.station.layout, row.station.ticketsPerSending)}</Cell>,
+                <Cell key="pace">{row.station.pace === null ? <span className="text-quiet">Not said</span> : `${row.station.pace} in 15 min`}</Cell>,
+                <Cell key="now">{row.station.open ? <Tag tone="calm">Open</Tag> : <Tag tone="look">Closed</Tag>}</Cell>,
+                <Link key="open" className={findingActionClass} href={href(`station=${encodeURIComponent(row.station.id)}`)} scroll={false} aria-label={`${mayWrite ? 'Edit' : 'Open'} ${row.station.name}`}>{mayWrite ? 'Edit' : 'Open'}</Link>,
               ],
-              findings: null,
+              findings: row.findings.length === 0 ? null : findings(row.findings),
             }))}
           />
         )}

@@ -1,7 +1,10 @@
 import { beforeEach, describe, expect, it } from 'vitest';
-import { inputOfStation, newStationInput } from '@/features/stations/station-view';
 import type { StationInput } from '@/features/stations/schema';
-import { createStation, deleteStation, orderStations, updateStation } from '@/features/stations/server/stations';
+import { createStation } from '@/features/stations/server/create-station';
+import { deleteStation } from '@/features/stations/server/delete-station';
+import { orderStations } from '@/features/stations/server/order-stations';
+import { updateStation } from '@/features/stations/server/update-station';
+import { inputOfStation, newStationInput } from '@/features/stations/station-form-values';
 import type { Role } from '@/lib/domain/roles/permissions';
 import type { Site } from '@/lib/domain/site/site';
 import type { Station } from '@/lib/domain/site/station';
@@ -39,29 +42,60 @@ describe('stations', () => {
 
   it('close and open with a word in the history, and keep their printers in order', async () => {
     const bar = await station('Bar');
-    await updateStation(chef, bar.id, bar.version, { ...inputOfStation(bar), open: false, printers: ['bar1', 'bar2'] });
-    expect(await station('Bar')).toMatchObject({ open: false, printers: ['bar1', 'bar2'] });
-    expect(await lastChangeOf(siteId, 'station', bar.id)).toMatchObject({ summary: 'Bar closed' });
-    expect(await refused(updateStation(chef, bar.id, bar.version, inputOfStation(bar)))).toBeInstanceOf(StaleWrite);
+    await updateStation(chef, { station: bar.id, version: bar.version, input: { ...inputOfStation(bar), open: false, printers: ['bar1', 'bar2'] } });
+    expect(await station('Bar')).toMatchObject({ open: false, printers: ['bar1', 'bar2'], version: bar.version + 1 });
+    expect(await lastChangeOf(siteId, 'station', bar.id)).toMatchObject({ by: 'Ines Okafor', summary: 'Bar closed; printers BAR2, then BAR1 to BAR1, then BAR2' });
   });
 
-  it('stay while a rule sends to them, and are let go of as stand-ins when they go', async () => {
+  it('keep what somebody else saved first, whole, and hand it back with the refusal', async () => {
+    const bar = await station('Bar');
+    await updateStation(chef, { station: bar.id, version: bar.version, input: { ...inputOfStation(bar), printers: ['bar1'], pace: 35 } });
+    const error = await refused(updateStation(chef, { station: bar.id, version: bar.version, input: { ...inputOfStation(bar), name: 'Cocktails', code: 'GZ' } }));
+    expect(error).toBeInstanceOf(StaleWrite);
+    expect(error).toMatchObject({ version: bar.version + 1, current: { pace: 35 } });
+    expect(await station('Bar')).toMatchObject({ name: 'Bar', printers: ['bar1'], pace: 35 });
+  });
+
+  it('that are gone are said to be gone', async () => {
+    expect(await refused(updateStation(chef, { station: 'nowhere', version: 1, input: await fry() }))).toMatchObject({ code: 'not-found' });
+    expect(await refused(deleteStation(chef, { station: 'nowhere', version: 1 }))).not.toBe('done');
+  });
+
+  it('stay while a plan sends to them', async () => {
     const grill = await station('Grill');
-    expect(await refused(deleteStation(chef, grill.id, grill.version))).toMatchObject({ code: 'conflict' });
-    const { id } = await createStation(chef, await fry());
-    const pass = await station('Larder');
-    await updateStation(chef, pass.id, pass.version, { ...inputOfStation(pass), standIn: id });
-    await deleteStation(chef, id, 1);
-    expect(await station('Larder')).toMatchObject({ standIn: null });
+    const error = await refused(deleteStation(chef, { station: grill.id, version: grill.version }));
+    expect(error).toMatchObject({ code: 'conflict' });
+    expect(String((error as Error).message)).toMatch(/send dishes or copies to it/);
+    expect(await station('Grill')).toEqual(grill);
   });
 
-  it('are put in another order', async () => {
+  it('are let go of as stand-ins when they go, which the history says', async () => {
+    const { id } = await createStation(chef, await fry());
+    const larder = await station('Larder');
+    await updateStation(chef, { station: larder.id, version: larder.version, input: { ...inputOfStation(larder), standIn: id } });
+    expect(await refused(deleteStation(chef, { station: id, version: 9 }))).toBeInstanceOf(StaleWrite);
+    expect(await station('Larder')).toMatchObject({ standIn: id });
+    await deleteStation(chef, { station: id, version: 1 });
+    expect(await station('Larder')).toMatchObject({ standIn: null, version: larder.version + 2 });
+    expect((await lastChangeOf(siteId, 'station', id))?.summary).toBe('Fry taken off the list. Larder has no stand-in any more.');
+  });
+
+  it('are put in another order all together, or not at all', async () => {
     const ids = (await site()).stations.map((one) => one.id as string).toReversed();
     await orderStations(chef, ids);
     expect((await site()).stations.map((one) => one.id)).toEqual(ids);
+    for (const wrong of [ids.slice(1), [...ids, 'oven'], [...ids.slice(1), ids[1]!]]) expect(await refused(orderStations(chef, wrong))).toMatchObject({ code: 'conflict' });
+    expect((await site()).stations.map((one) => one.id)).toEqual(ids);
   });
 
-  it('are not for installers and trainers to change', async () => {
-    for (const role of ['installer', 'trainer'] as const) expect(await refused(createStation(as(role), await fry()))).toMatchObject({ code: 'not-allowed' });
+  it.each<readonly [string, (actor: Actor) => Promise<unknown>]>([
+    ['added', async (actor) => createStation(actor, await fry())],
+    ['changed', async (actor) => updateStation(actor, { station: 'grill', version: 1, input: inputOfStation(await station('Grill')) })],
+    ['taken off', (actor) => deleteStation(actor, { station: 'grill', version: 1 })],
+    ['put in order', (actor) => orderStations(actor, ['grill'])],
+  ])('are not %s by installers and trainers', async (_, attempt) => {
+    const before = await site();
+    for (const role of ['installer', 'trainer'] as const) expect(await refused(attempt(as(role)))).toMatchObject({ code: 'not-allowed' });
+    expect(await site()).toEqual(before);
   });
 });
