@@ -19,8 +19,6 @@ export type StationRow = {
 export type StationsOverview = {
   readonly verdict: string;
   readonly said: string;
-  /** The plan that `cooks` is about; null when the site has none. */
-  readonly plan: string | null;
   readonly rows: readonly StationRow[];
 };
 
@@ -58,8 +56,10 @@ export const stationsOverview = (site: Site): StationsOverview => {
   const passes = site.stations.filter((station) => station.kind === 'pass').length;
   return {
     verdict: verdictOf(site.stations, rows.flatMap((row) => row.findings)),
-    said: site.stations.length === 0 ? '' : `${countWords(site.stations.length - passes, 'station cooks', 'stations cook')}, ${passes === 0 ? 'and there is no pass' : `${countWords(passes, 'pass', 'passes')}`}.`,
-    plan: plan?.name ?? null,
+    said: site.stations.length === 0 ? '' : [
+      `${countWords(site.stations.length - passes, 'station cooks', 'stations cook')}, ${passes === 0 ? 'and there is no pass' : countWords(passes, 'pass', 'passes')}.`,
+      ...(plan === undefined ? [] : [`What each cooks is as in ${plan.name}.`]),
+    ].join(' '),
     rows,
   };
 };

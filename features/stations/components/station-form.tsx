@@ -63,7 +63,7 @@ export function StationFormFields({ of, view }: PartProps & { readonly view: Sta
       <FormPart title="Where its tickets come out">
         <PrinterOrder printers={view.printers} chosen={typed.printers} error={errors.printers?.message} change={(printers) => form.setValue('printers', printers, { shouldDirty: true })} />
         {notesOf(of, 'printers')}
-        <div className={twoColumns}>
+        <div className="flex flex-wrap gap-x-6 gap-y-3">
           <PickOne legend="Ticket" name="layout" choices={ticketLayouts.map((value) => ({ value, words: layoutWords[value] }))} chosen={typed.layout} choose={(value) => form.setValue('layout', value, { shouldDirty: true })} />
           <PickOne legend="Tickets for each sending" name="ticketsPerSending" choices={['1', '2', '3'].map((value) => ({ value, words: value }))} chosen={String(typed.ticketsPerSending)} choose={(value) => form.setValue('ticketsPerSending', Number(value), { shouldDirty: true })} />
         </div>

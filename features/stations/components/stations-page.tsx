@@ -21,16 +21,16 @@ type StationsPageProps = {
   readonly panel: ReactNode;
 };
 
-/** As tall as the stamp at the start of the line, so that the words stand on one line with it. */
-function Cell({ children, wide = false }: { readonly children: ReactNode; readonly wide?: boolean }) {
-  return <span className={`inline-block py-1.5 align-top leading-5 ${wide ? 'max-w-[34ch]' : ''}`}>{children}</span>;
+/** In a line of the table the words stand on one height with the stamp; in a card on a phone they need none of that. */
+function Cell({ children }: { readonly children: ReactNode }) {
+  return <span className="min-[721px]:inline-block min-[721px]:max-w-[36ch] min-[721px]:py-1.5 min-[721px]:leading-5">{children}</span>;
 }
 
 function Name({ row: { station } }: { readonly row: StationRow }) {
   return (
     <span className="flex items-center gap-2.5">
       <Stamp code={station.code} mesh={station.mesh} colour={station.colour} size="small" />
-      <span className="leading-tight"><b>{station.name}</b><span className="sr-only">, code {station.code}</span><span className="block text-[12px] text-quiet">{kindWords[station.kind]}</span></span>
+      <span className="leading-tight"><b>{station.name}</b><span className="sr-only">, code {station.code}</span>{station.kind === 'pass' ? <span className="block text-[12px] text-quiet">{kindWords.pass}</span> : null}</span>
     </span>
   );
 }
@@ -43,8 +43,7 @@ function Printers({ row }: { readonly row: StationRow }) {
 /** All stations of a site in their order. A line reads as a sentence: Grill, cooks these, prints there. */
 export function StationsPage({ siteId, overview, mayWrite, findings, panel }: StationsPageProps) {
   const href = (query: string): string => `/sites/${siteId}/stations?${query}`;
-  const { rows, plan } = overview;
-  const cooks = plan === null ? 'Cooks' : `Cooks in ${plan}`;
+  const { rows } = overview;
   return (
     <>
       <PageHead title={overview.verdict} sub={overview.said === '' ? undefined : overview.said}>
@@ -60,18 +59,18 @@ export function StationsPage({ siteId, overview, mayWrite, findings, panel }: St
         ) : (
           <DeviceTable
             caption="Stations"
-            columns={['Station', cooks, 'Prints on', 'Stand-in', 'Ticket', 'Pace', 'Now', '']}
+            columns={['Station', 'Cooks', 'Prints on', 'Stand-in', 'Ticket', 'Pace', 'Now', '']}
             rows={rows.map((row) => ({
               id: row.station.id,
               name: <Name row={row} />,
               cells: [
-                <Cell key="cooks" wide>{row.cooks === '' ? <span className="text-quiet">Nothing hangs there</span> : row.cooks}</Cell>,
+                <Cell key="cooks">{row.cooks === '' ? <span className="text-quiet">Nothing hangs there</span> : row.cooks}</Cell>,
                 <Cell key="printers"><Printers row={row} /></Cell>,
                 <Cell key="stand-in">{row.standIn === '' ? <span className="text-quiet">None</span> : row.standIn}</Cell>,
                 <Cell key="ticket">{ticketWords(row.station.layout, row.station.ticketsPerSending)}</Cell>,
                 <Cell key="pace">{row.station.pace === null ? <span className="text-quiet">Not said</span> : `${row.station.pace} in 15 min`}</Cell>,
                 <Cell key="now">{row.station.open ? <Tag tone="calm">Open</Tag> : <Tag tone="look">Closed</Tag>}</Cell>,
-                <Link key="open" className={findingActionClass} href={href(`station=${encodeURIComponent(row.station.id)}`)} scroll={false} aria-label={`${mayWrite ? 'Edit' : 'Open'} ${row.station.name}`}>{mayWrite ? 'Edit' : 'Open'}</Link>,
+                <Link key="open" className={`${findingActionClass} min-[721px]:min-h-8`} href={href(`station=${encodeURIComponent(row.station.id)}`)} scroll={false} aria-label={`${mayWrite ? 'Edit' : 'Open'} ${row.station.name}`}>{mayWrite ? 'Edit' : 'Open'}</Link>,
               ],
               findings: row.findings.length === 0 ? null : findings(row.findings),
             }))}
