@@ -4,6 +4,7 @@ import Credentials from 'next-auth/providers/credentials';
 import { env } from '@/lib/env';
 import { addressOf } from './address-of';
 import { checkSignIn } from './check-sign-in';
+import { log } from './log';
 import { endSession, startSession, type SessionClaims } from './session';
 import { fortnightSeconds } from './session-cookie';
 
@@ -23,6 +24,14 @@ const headerOf = (headers: unknown, name: string): string => {
 export const authOptions = (): NextAuthOptions => ({
   secret: env().NEXTAUTH_SECRET,
   session: { strategy: 'jwt', maxAge: fortnightSeconds },
+  logger: {
+    error: (code, about) => {
+      // A cookie that has run out or was made up is nobody's, and no fault.
+      if (code !== 'JWT_SESSION_ERROR') log.error({ code, error: about instanceof Error ? about.message : about.error.message }, 'signing in');
+    },
+    warn: (code) => log.warn({ code }, 'signing in'),
+    debug: () => undefined,
+  },
   pages: { signIn: '/sign-in', error: '/sign-in' },
   providers: [
     Credentials({
