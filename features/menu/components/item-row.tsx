@@ -12,6 +12,8 @@ import type { Line } from './use-items';
 export type RowProps = {
   readonly line: Line;
   readonly index: number;
+  /** Index of the last line. */
+  readonly last: number;
   readonly view: Pick<MenuView, 'courses' | 'groups'>;
   readonly change: (id: string, input: ItemInput, words?: string) => void;
   readonly drop: (id: string) => void;
@@ -64,7 +66,7 @@ function TextCell({ label, value, column, className, save, onPaste }: CellProps)
 const number = (text: string): number | null | undefined => (text.trim() === '' ? null : /^\d{1,6}$/.test(text.trim()) ? Number(text) : undefined);
 
 /** One item as a line of cells. Alt with the arrows moves the line; the handle drags it. */
-export function ItemRow({ line, index, view, change, drop, move, paste }: RowProps) {
+export function ItemRow({ line, index, last, view, change, drop, move, paste }: RowProps) {
   const { id, input } = line;
   const { name } = input;
   const set = (part: Partial<ItemInput>, words?: string): void => change(id, { ...input, ...part }, words);
@@ -100,7 +102,11 @@ export function ItemRow({ line, index, view, change, drop, move, paste }: RowPro
       <td><TextCell label={`How many of ${name} are left`} column="left" className={styles['number']} value={input.left === null ? '' : String(input.left)} onPaste={pasteAt('left')} save={(text) => setNumber('left', text)} /></td>
       <td className="text-center"><input type="checkbox" aria-label={`${name} is sold out`} checked={input.soldOut} onChange={(event) => set({ soldOut: event.target.checked }, event.target.checked ? `${name} is sold out.` : `${name} is back.`)} /></td>
       <td className="text-center"><input type="checkbox" aria-label={`${name} needs no ticket`} checked={input.noTicket} onChange={(event) => set({ noTicket: event.target.checked })} /></td>
-      <td><button type="button" onClick={() => drop(id)} aria-label={`Take ${name} off the menu`} className="min-h-8 rounded px-2 text-[12.5px] font-semibold underline underline-offset-3">Delete</button></td>
+      <td className="whitespace-nowrap">
+        <button type="button" className={styles['nudge']} disabled={index === 0} onClick={() => move(index, index - 1)} aria-label={`Move ${name} up`}>↑</button>
+        <button type="button" className={styles['nudge']} disabled={index === last} onClick={() => move(index, index + 1)} aria-label={`Move ${name} down`}>↓</button>
+        <button type="button" onClick={() => drop(id)} aria-label={`Take ${name} off the menu`} className="min-h-8 rounded px-2 text-[12.5px] font-semibold underline underline-offset-3">Delete</button>
+      </td>
     </tr>
   );
 }

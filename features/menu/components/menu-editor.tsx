@@ -50,7 +50,7 @@ export function MenuEditor({ view }: { readonly view: MenuView }) {
         <table className={`${styles['table']} ${styles['grid']}`}>
           <thead><tr>{headings.map((heading, index) => <th key={index} scope="col">{heading === '' ? <span className="sr-only">{index === 0 ? 'Move' : 'Delete'}</span> : heading}</th>)}</tr></thead>
           <tbody>
-            {lines.map((line, index) => <ItemRow key={line.id} line={line} index={index} view={view} change={items.change} drop={(id) => void items.drop(id)} move={items.move} paste={paste} />)}
+            {lines.map((line, index) => <ItemRow key={line.id} line={line} index={index} last={lines.length - 1} view={view} change={items.change} drop={(id) => void items.drop(id)} move={items.move} paste={paste} />)}
           </tbody>
         </table>
       </div>
