@@ -11,6 +11,8 @@ export type DryRun = {
   readonly unchanged: number;
   readonly sections: readonly string[];
   readonly groups: readonly string[];
+  /** The first items that would change, and what of them. */
+  readonly changes: readonly { readonly name: string; readonly what: string }[];
   readonly errors: readonly LineError[];
   readonly errorCount: number;
   readonly digest: string;

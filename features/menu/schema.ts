@@ -25,6 +25,12 @@ export type ItemInput = z.output<typeof itemInput>;
 
 /** Several lines at once, as when rows are pasted: all of them or none. */
 export const itemsInput = z.strictObject({ items: z.array(itemInput).min(1).max(500, 'Paste at most 500 lines at a time, or bring in a file.') });
+/** A pasted block: lines that are there with the version they were read at, and new ones. */
+export const pasteInput = z.strictObject({
+  updates: z.array(z.strictObject({ id, version: z.int().min(1), item: itemInput })).max(500, 'Paste at most 500 lines at a time, or bring in a file.'),
+  creates: z.array(itemInput).max(500, 'Paste at most 500 lines at a time, or bring in a file.'),
+});
+export type PasteInput = z.output<typeof pasteInput>;
 export const orderInput = z.strictObject({ ids: z.array(id).min(1).max(5_000) });
 
 export const optionGroupInput = z.strictObject({

@@ -6,6 +6,7 @@ import { aGroup, anItem, anOption, aSection, aSite } from '@/tests/fixtures/buil
 import { seeded } from '@/tests/fixtures/generated-site';
 import { decodeFile } from './decode-file';
 import { guessMapping } from './fields';
+import { foldName } from './fold-name';
 import { readGroups, writeGroups, type GroupText } from './option-cell';
 import { planImport, type ImportPlan } from './plan-import';
 import { readTable } from './read-table';
@@ -85,6 +86,29 @@ describe('a dry run', () => {
     expect(dry.creates.map((item) => item.optionGroups)).toEqual([['side'], [dry.groups[0]!.id], [dry.groups[0]!.id]]);
     expect(dry.errors.map((error) => error.line)).toEqual([5]);
   });
+
+  it.each([
+    ['Heat: Mild', 'is fine without limits', undefined],
+    ['Side (0-1) Chips', 'has no colon', 'needs one “:”'],
+    ['Side (0-1):', 'has no options', 'The group “Side” has no options.'],
+    ['Side (3-1): Chips', 'asks for more than it lets', 'asks for at least 3 and at most 1'],
+    ['Side (0-60): Chips', 'lets more than fifty', 'at most 50 can be'],
+    ['Side (0-1): Chips; chips', 'has an option twice', 'has the option “chips” twice'],
+    ['Side (0-1): Chips | side: Rice', 'has a group twice', 'The group “side” stands twice.'],
+    ['Side (0-1): Chips {brazil}', 'names no allergen of the list', '“brazil” is no allergen of the list.'],
+    ['Side (0-1): Chips {milk', 'leaves a bracket open', 'a bracket that is not closed'],
+    [': Chips', 'has no name', 'A group of options has no name.'],
+  ])('reads the options “%s”, which %s', (cell, _, words) => {
+    const dry = plan(`Section;Item;Options\nBurgers;A;"${cell}"\n`);
+    if (words === undefined) expect(dry.errors).toEqual([]);
+    else expect(dry.errors).toMatchObject([{ line: 2, column: 'Options', reason: expect.stringContaining(words) as string }]);
+  });
+
+  it('takes names for one that the tables take for one, and keeps accents apart', () => {
+    const dry = plan('Section;Item\nBurgers;Maßkrug\nburgers;MASSKRUG\nBurgers;Ste\u00adak\nBurgers;Steak\nBurgers;Crème\nBurgers;Creme\nBurgers;Ｆｕｌｌ\nBurgers;full\n');
+    expect(dry.errors.map(({ line }) => line)).toEqual([3, 5, 9]);
+    expect(dry.creates.map((item) => item.name)).toEqual(['Maßkrug', 'Ste\u00adak', 'Crème', 'Creme', 'Ｆｕｌｌ']);
+  });
 });
 
 describe('the same menu out and in again', () => {
@@ -94,7 +118,7 @@ describe('the same menu out and in again', () => {
 
   it('brings back any name, whatever a spreadsheet would make of it', () => {
     const name = fc.string({ minLength: 1, maxLength: 40 }).map((text) => text.normalize('NFC').replace(/[\u0000-\u001f\u007f]/g, '').trim()).filter((text) => text !== '');
-    fc.assert(fc.property(fc.uniqueArray(name, { minLength: 1, maxLength: 6, selector: (text) => text.toLowerCase() }), (names) => {
+    fc.assert(fc.property(fc.uniqueArray(name, { minLength: 1, maxLength: 6, selector: foldName }), (names) => {
       const odd = aSite({ menu: { sections: [aSection('s', { name: '=Section' })], items: names.map((one, index) => anItem(`i${index}`, 's', { name: one, kitchenName: one.slice(0, 12).trim() })) } });
       expect(plan(writeMenuFile(odd), odd)).toMatchObject({ creates: [], updates: [], unchanged: names.length, errors: [] });
     }), seeded);
@@ -111,9 +135,9 @@ describe('the same menu out and in again', () => {
     const words = fc.string({ minLength: 1, maxLength: 12 }).map((text) => text.replace(/[\u0000-\u001f\u007f]/g, '').trim()).filter((text) => text !== '');
     const group = fc.record({
       name: words, min: fc.constantFrom(0, 1), max: fc.constantFrom(1, 2),
-      options: fc.array(fc.record({ name: words, kitchenName: fc.oneof(fc.constant(''), words), allergens: fc.uniqueArray(fc.constantFrom(...allergens), { maxLength: 2 }).map((some) => allergens.filter((one) => some.includes(one))) }), { minLength: 1, maxLength: 3 }),
+      options: fc.uniqueArray(fc.record({ name: words, kitchenName: fc.oneof(fc.constant(''), words), allergens: fc.uniqueArray(fc.constantFrom(...allergens), { maxLength: 2 }).map((some) => allergens.filter((one) => some.includes(one))) }), { minLength: 1, maxLength: 3, selector: (option) => foldName(option.name) }),
     });
-    fc.assert(fc.property(fc.array(group, { maxLength: 3 }), (groups: readonly GroupText[]) => {
+    fc.assert(fc.property(fc.uniqueArray(group, { maxLength: 3, selector: ({ name }) => foldName(name) }), (groups: readonly GroupText[]) => {
       expect(readGroups(writeGroups(groups))).toEqual({ ok: true, groups });
     }), seeded);
   });

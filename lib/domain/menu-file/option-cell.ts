@@ -1,4 +1,5 @@
 import { allergens, type Allergen } from '@/lib/domain/site/menu';
+import { foldName } from './fold-name';
 
 /**
  * The option groups of an item in one cell: groups split by "|", each "Name (min-max): option; option", each option
@@ -25,6 +26,11 @@ const splitAt = (text: string, separator: string): readonly string[] => {
   return pieces;
 };
 
+/** As many characters, and as many choices, as a menu takes. */
+const longestName = 120;
+const mostChoices = 50;
+const unreadable = /[\u0000-\u001f\u007f]/;
+
 const unescape = (text: string): string => text.trim().replace(/\\(.)/gs, '$1');
 
 /** Allergen names as the menu knows them; the rest is said. */
@@ -39,6 +45,7 @@ const readOption = (text: string): OptionText | string => {
   if (braces === null) return `The option “${text.trim()}” has a bracket that is not closed.`;
   const [name = '', kitchenName = '', ...more] = splitAt(braces[1] ?? '', '=').map(unescape);
   if (name === '' || more.length > 0) return `The option “${text.trim()}” has no name, or more than one “=”.`;
+  if (name.length > longestName || kitchenName.length > longestName) return `The option “${name.slice(0, 40)}…” has more than ${longestName} characters.`;
   const { known, unknown } = readAllergens(unescape(braces[2] ?? ''));
   return unknown.length > 0 ? `“${unknown.join(', ')}” is no allergen of the list.` : { name, kitchenName, allergens: known };
 };
@@ -52,19 +59,29 @@ const readGroup = (text: string): GroupText | string => {
   const min = Number(limits[2] ?? 0);
   const max = Number(limits[3] ?? 1);
   if (name === '') return 'A group of options has no name.';
+  if (name.length > longestName) return `The group “${name.slice(0, 40)}…” has more than ${longestName} characters.`;
+  if (max > mostChoices) return `The group “${name}” lets ${max} be chosen; at most ${mostChoices} can be.`;
   if (max < 1 || max < min) return `The group “${name}” asks for at least ${min} and at most ${max}, which nobody can choose.`;
   const options = splitAt(rest[0] ?? '', ';').filter((option) => option.trim() !== '').map(readOption);
   const fault = options.find((option) => typeof option === 'string');
   if (fault !== undefined) return fault;
-  return { name, min, max, options: options.filter((option) => typeof option !== 'string') };
+  const known = options.filter((option) => typeof option !== 'string');
+  if (known.length === 0) return `The group “${name}” has no options.`;
+  const twice = twiceIn(known.map((option) => option.name));
+  return twice === undefined ? { name, min, max, options: known } : `The group “${name}” has the option “${twice}” twice.`;
 };
+
+const twiceIn = (names: readonly string[]): string | undefined => names.find((name, index) => names.findIndex((other) => foldName(other) === foldName(name)) < index);
 
 export const readGroups = (cell: string): GroupsReading => {
   if (cell.trim() === '') return { ok: true, groups: [] };
+  if (unreadable.test(cell)) return { ok: false, message: 'The options have a line break or another control character in them.' };
   const groups = splitAt(cell, '|').map(readGroup);
   const fault = groups.find((group) => typeof group === 'string');
   if (fault !== undefined) return { ok: false, message: fault };
-  return { ok: true, groups: groups.filter((group) => typeof group !== 'string') };
+  const known = groups.filter((group) => typeof group !== 'string');
+  const twice = twiceIn(known.map((group) => group.name));
+  return twice === undefined ? { ok: true, groups: known } : { ok: false, message: `The group “${twice}” stands twice.` };
 };
 
 const writeOption = ({ name, kitchenName, allergens: said }: OptionText): string =>

@@ -4,6 +4,7 @@ import { asId } from '@/lib/domain/site/ids';
 import type { Site } from '@/lib/domain/site/site';
 import type { Mapping } from './fields';
 import { fieldWords } from './fields';
+import { foldName } from './fold-name';
 import type { GroupText } from './option-cell';
 import { readItems, type LineError, type ReadItem } from './read-items';
 import type { Table } from './read-table';
@@ -19,8 +20,7 @@ export type ImportPlan = {
   readonly errors: readonly LineError[];
 };
 
-const fold = (text: string): string => text.normalize('NFC').toLowerCase();
-const key = (section: string, name: string): string => `${fold(section)}\n${fold(name)}`;
+const key = (section: string, name: string): string => `${foldName(section)}\n${foldName(name)}`;
 
 type Working = {
   readonly menu: Menu;
@@ -34,27 +34,27 @@ type Working = {
 };
 
 const groupText = (group: Pick<GroupText, 'min' | 'max' | 'options'>): string =>
-  JSON.stringify([group.min, group.max, group.options.map(({ name, kitchenName, allergens }) => [fold(name), kitchenName, [...allergens].sort()])]);
+  JSON.stringify([group.min, group.max, group.options.map(({ name, kitchenName, allergens }) => [foldName(name), kitchenName, [...allergens].sort()])]);
 
 const sectionFor = (working: Working, name: string): Section => {
-  const known = working.sections.get(fold(name));
+  const known = working.sections.get(foldName(name));
   if (known !== undefined) return known;
   const made: Section = { id: asId(working.newId()), name, position: working.sections.size, version: 1 };
-  working.sections.set(fold(name), made);
+  working.sections.set(foldName(name), made);
   working.newSections.push(made);
   return made;
 };
 
 /** A group by its name; the same name with other options is an error, never a silent change for other items. */
 const groupFor = (working: Working, said: GroupText): OptionGroup | string => {
-  const known = working.groups.get(fold(said.name));
+  const known = working.groups.get(foldName(said.name));
   if (known !== undefined) {
     return known.text === groupText(said) ? known.group : `The group “${said.name}” has other options elsewhere. Give it another name, or the same options.`;
   }
   const id = asId<OptionGroup['id']>(working.newId());
   const options = said.options.map((option, position): Option => ({ id: asId(working.newId()), group: id, name: option.name, kitchenName: option.kitchenName, allergens: option.allergens, position, version: 1 }));
   const group: OptionGroup = { id, name: said.name, min: said.min, max: said.max, options: options.map((option) => option.id), version: 1 };
-  working.groups.set(fold(said.name), { group, text: groupText(said) });
+  working.groups.set(foldName(said.name), { group, text: groupText(said) });
   working.newGroups.push(group);
   working.newOptions.push(...options);
   return group;
@@ -63,7 +63,7 @@ const groupFor = (working: Working, said: GroupText): OptionGroup | string => {
 const sameItem = (left: Item, right: Item): boolean => JSON.stringify({ ...left, allergens: [...left.allergens].sort() }) === JSON.stringify({ ...right, allergens: [...right.allergens].sort() });
 
 const nextItem = (working: Working, said: ReadItem, present: Item | undefined, position: number): Item | LineError => {
-  const course = said.course === undefined || said.course === '' ? null : working.courses.get(fold(said.course));
+  const course = said.course === undefined || said.course === '' ? null : working.courses.get(foldName(said.course));
   if (course === undefined) return { line: said.line, column: fieldWords.course, reason: `This site has no course “${said.course ?? ''}”. Add it to the site, or use one of its own.` };
   const groups = said.groups?.map((group) => groupFor(working, group));
   const fault = groups?.find((group) => typeof group === 'string');
@@ -100,9 +100,9 @@ export const planImport = (site: Pick<Site, 'menu' | 'courses'>, table: Table, m
   const known = new Map(menu.items.map((item) => [key(sectionNames.get(item.section) ?? '', item.name), item]));
   const working: Working = {
     menu, newId, newSections: [], newGroups: [], newOptions: [],
-    courses: new Map(site.courses.map((course) => [fold(course.name), course])),
-    sections: new Map(menu.sections.map((section) => [fold(section.name), section])),
-    groups: new Map(menu.optionGroups.map((group) => [fold(group.name), { group, text: groupText({ ...group, options: group.options.flatMap((id) => optionOf.get(id) ?? []) }) }])),
+    courses: new Map(site.courses.map((course) => [foldName(course.name), course])),
+    sections: new Map(menu.sections.map((section) => [foldName(section.name), section])),
+    groups: new Map(menu.optionGroups.map((group) => [foldName(group.name), { group, text: groupText({ ...group, options: group.options.flatMap((id) => optionOf.get(id) ?? []) }) }])),
   };
   const found: LineError[] = [...errors];
   const creates: Item[] = [];

@@ -1,5 +1,6 @@
 import { fileQuery, siteParams } from '@/features/menu/schema';
-import { exportMenu, importMenu } from '@/features/menu/server/import-menu';
+import { exportMenu } from '@/features/menu/server/export-menu';
+import { importMenu } from '@/features/menu/server/import-menu';
 import { maxFileBytes } from '@/lib/domain/menu-file/decode-file';
 import { route } from '@/lib/server/route';
 
