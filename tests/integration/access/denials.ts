@@ -51,8 +51,9 @@ export const denials: readonly Denial[] = [
   ...methods('stations/order', 'station.write', ['PUT']),
   ...methods('stations/[station]', 'station.write', ['PUT', 'DELETE'], { foreign: { station: 'oven' } }),
 
-  ...methods('items', 'menu.write', ['POST']),
+  ...methods('items', 'menu.write', ['POST', 'PUT']),
   ...methods('items/order', 'menu.write', ['PUT']),
+  ...methods('items/[item]', 'site.read', ['GET'], { foreign: { item: 'baguette' } }),
   ...methods('items/[item]', 'menu.write', ['PUT', 'DELETE'], { foreign: { item: 'baguette' }, body: { section: 'pasta', name: 'Baguette' } }),
   ...methods('sections', 'menu.write', ['POST']),
   ...methods('sections/order', 'menu.write', ['PUT']),
