@@ -37,7 +37,7 @@ export type RouteInput<Params, Query, Body> = Actor & {
   readonly request: Request;
 };
 
-type Context = { readonly params: Promise<Record<string, string | string[]>> };
+type Context = { readonly params: Promise<Record<string, string | string[]> | undefined> };
 
 const nobody: Person = { id: '', name: '', email: '' };
 const noMembership: Actor['membership'] = { role: 'trainer', mayOverride: false, title: '' };
@@ -78,7 +78,8 @@ export const route = <Params extends Schema | undefined = undefined, Query exten
   try {
     const writes = request.method !== 'GET' && request.method !== 'HEAD';
     if (writes) mustBeSameOrigin(request);
-    const raw = await context.params;
+    // An address without a part in brackets has none, whatever the type says.
+    const raw = (await context.params) ?? {};
     const actor = await findActor(rules.permission, String(raw['site'] ?? ''));
     const version = rules.ifMatch === true ? readVersion(request) : 0;
     const sent = writes ? await readBody(request, { json: rules.upload === undefined, maxBytes: rules.upload?.maxBytes ?? rules.maxBytes ?? 1_000_000, types: rules.upload?.types ?? [] }) : { json: undefined, bytes: new Uint8Array(), type: '' };

@@ -16,9 +16,9 @@ export const invitationMail = ({ email, role, title }: Invited, { inviter, site,
     subject: `${inviter} invites you to ${site}`,
     text: [
       `${inviter} invites you to ${site} on Tamis, as ${as}.`,
-      'Tamis decides what prints where in the kitchen. To join, open this page and choose a password:',
+      'Tamis decides what prints where in the kitchen. To join, open this page\nand choose a password:',
       `${env().NEXTAUTH_URL.replace(/\/$/, '')}/invitation/${token}`,
-      `The page works once and for ${days} days, for whoever has this e-mail. If you did not expect it, do nothing: without it, nothing happens.`,
+      `The page works once and for ${days} days, for whoever has this e-mail.\nIf you did not expect it, do nothing: without you, nothing happens.`,
     ].join('\n\n'),
   };
 };

@@ -32,7 +32,7 @@ type As = { readonly cookie?: string; readonly site?: string; readonly version?:
 const callAs = async (denial: Denial, { cookie, site: where = site, version }: As = {}): Promise<Response> => {
   const handlers = await handlersOf(denial.route);
   return call(handlers[denial.method], {
-    method: denial.method, path: `/api/${denial.route.replace('[site]', where)}`, params: { site: where, ...denial.foreign, ...denial.own },
+    method: denial.method, path: `/api/${denial.route.replace('[site]', where)}`, ...(denial.route.includes('[') ? { params: { site: where, ...denial.foreign, ...denial.own } } : {}),
     ...(denial.body === undefined || denial.method === 'DELETE' ? {} : { body: denial.body }), ...(cookie === undefined ? {} : { cookie }), ...(version === undefined ? {} : { headers: { 'if-match': `"${version}"` } }),
   });
 };

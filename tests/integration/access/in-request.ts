@@ -9,7 +9,7 @@ import { PersonRow } from '@/models/person';
 
 export const origin = 'http://127.0.0.1:3000';
 
-export type Handler = (request: NextRequest, context: { readonly params: Promise<Record<string, string | string[]>> }) => Promise<Response>;
+export type Handler = (request: NextRequest, context: { readonly params: Promise<Record<string, string | string[]> | undefined> }) => Promise<Response>;
 
 export type Call = {
   readonly method: string;
@@ -31,7 +31,7 @@ const ownHeaders = (method: string): Readonly<Record<string, string>> =>
   ({ host: '127.0.0.1:3000', ...(method === 'GET' ? {} : { 'origin': origin, 'sec-fetch-site': 'same-origin', 'content-type': 'application/json' }) });
 
 /** Calls a route handler as the framework does: the request's cookies are what `cookies()` gives. */
-export const call = (handler: unknown, { method, path = '/', params = {}, body, headers = {}, cookie }: Call): Promise<Response> => {
+export const call = (handler: unknown, { method, path = '/', params, body, headers = {}, cookie }: Call): Promise<Response> => {
   const sent = new Headers(ownHeaders(method));
   for (const [name, value] of Object.entries(headers)) {
     if (value === undefined) sent.delete(name);
@@ -42,7 +42,7 @@ export const call = (handler: unknown, { method, path = '/', params = {}, body, 
   const request = new NextRequest(`${origin}${path}`, { method, headers: sent, ...(hasBody ? { body: bodyOf(body ?? {}) ?? null, duplex: 'half' } : {}) });
   const store = createRequestStoreForAPI(request as never, request.nextUrl, undefined as never, undefined, undefined, undefined);
   const work = { route: path, page: path } as never;
-  return workAsyncStorage.run(work, () => workUnitAsyncStorage.run(store, () => (handler as Handler)(request, { params: Promise.resolve({ ...params }) })));
+  return workAsyncStorage.run(work, () => workUnitAsyncStorage.run(store, () => (handler as Handler)(request, { params: Promise.resolve(params) })));
 };
 
 /** Signs a person of the demo in, without the form. */
