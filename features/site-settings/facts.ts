@@ -4,14 +4,19 @@ import { valuesOf } from './parts';
 import type { Part, Values } from './schema';
 import { contactWords, followWords, linkWords, sayLanguage, sharedPointWords } from './words';
 
-export type Fact = { readonly label: string; readonly value: string };
+export type Fact = {
+  readonly label: string;
+  readonly value: string;
+  /** One by one, where the value is a list. */
+  readonly entries?: readonly string[];
+};
 
 /** What names things that values only point to. */
 export type Naming = Pick<Site, 'tills'>;
 
 const none = 'Nobody has said';
 const given = (text: string): string => (text === '' ? none : text);
-const joined = (lines: readonly string[]): string => (lines.length === 0 ? 'None' : lines.join('; '));
+const listed = (label: string, entries: readonly string[]): Fact => ({ label, value: entries.length === 0 ? 'None' : entries.join(', '), entries });
 const yes = (value: boolean): string => (value ? 'yes' : 'no');
 
 const linkFacts = ({ kind, till, address, mask }: Values<'link'>, { tills }: Naming): readonly Fact[] => [
@@ -29,32 +34,44 @@ export const factsOf: { readonly [Of in Part]: (values: Values<Of>, naming: Nami
     { label: 'Network', value: given(subnet) },
     { label: 'Router', value: given(gateway) },
     { label: 'Router hands out', value: poolFrom === '' && poolTo === '' ? 'Nothing' : `${given(poolFrom)} to ${given(poolTo)}` },
-    { label: 'Reserved', value: joined(reserved.map(({ address, reason }) => (reason === '' ? address : `${address} for ${reason}`))) },
+    listed('Reserved', reserved.map(({ address, reason }) => (reason === '' ? address : `${address} for ${reason}`))),
   ],
   link: linkFacts,
-  'shared-points': ({ points }) => [{ label: 'Shared points', value: joined(points.map(({ name, kind }) => `${name} (${sharedPointWords[kind].toLowerCase()})`)) }],
+  'shared-points': ({ points }) => [listed('Shared points', points.map(({ name, kind }) => `${name} (${sharedPointWords[kind].toLowerCase()})`))],
   names: (policy) => [
     { label: 'A good name has', value: sayPolicy(policy) },
     { label: 'Hyphens', value: yes(policy.allowHyphen) },
     { label: 'Underscores', value: yes(policy.allowUnderscore) },
     { label: 'Starts with a letter', value: yes(policy.mustStartWithLetter) },
   ],
-  courses: ({ courses }) => [{ label: 'Courses', value: joined(courses.map(({ name }) => name)) }],
+  courses: ({ courses }) => [listed('Courses', courses.map(({ name }) => name))],
   follow: ({ follows }) => [{ label: 'The tills follow', value: followWords[follows].toLowerCase() }],
-  contacts: ({ contacts }) => [{ label: 'Contacts', value: joined(contacts.map(({ kind, name, phone, email }) => [`${contactWords[kind]}: ${name}`, phone, email].filter((text) => text !== '').join(', '))) }],
+  contacts: ({ contacts }) => [listed('Contacts', contacts.map(({ kind, name, phone, email }) => [`${contactWords[kind]} ${name}`, phone, email].filter((text) => text !== '').join(' ')))],
 };
 
 export type Difference = { readonly label: string; readonly from: string; readonly to: string };
+
+/** "4, with Cheese, without Starters": of a long list only what came and went is news. */
+const sayEntries = (before: readonly string[], after: readonly string[]): string => {
+  const came = after.filter((entry) => !before.includes(entry));
+  const went = before.filter((entry) => !after.includes(entry));
+  const news = [...(came.length === 0 ? [] : [`with ${came.join(', ')}`]), ...(went.length === 0 ? [] : [`without ${went.join(', ')}`])];
+  return [`${after.length}`, ...(news.length === 0 ? ['in another order'] : news)].join(', ');
+};
+
+const differenceOf = (label: string, was: Fact | undefined, is: Fact | undefined): readonly Difference[] => {
+  const [from, to] = [was?.value ?? 'None', is?.value ?? 'None'];
+  if (from === to) return [];
+  if (was?.entries === undefined || is?.entries === undefined) return [{ label, from, to }];
+  return [{ label, from: `${was.entries.length}`, to: sayEntries(was.entries, is.entries) }];
+};
 
 /** What a person would call different between two values of a part. */
 export const settingDifferences = <Of extends Part>(part: Of, before: Values<Of>, after: Values<Of>, naming: Naming): readonly Difference[] => {
   const was = factsOf[part](before, naming);
   const is = factsOf[part](after, naming);
-  return [...new Set([...was, ...is].map(({ label }) => label))].flatMap((label) => {
-    const from = was.find((fact) => fact.label === label)?.value ?? 'None';
-    const to = is.find((fact) => fact.label === label)?.value ?? 'None';
-    return from === to ? [] : [{ label, from, to }];
-  });
+  return [...new Set([...was, ...is].map(({ label }) => label))]
+    .flatMap((label) => differenceOf(label, was.find((fact) => fact.label === label), is.find((fact) => fact.label === label)));
 };
 
 /** The values of a part as the site has them. */

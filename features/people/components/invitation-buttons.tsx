@@ -21,7 +21,7 @@ export function InvitationButtons({ siteId, invitation, email }: { readonly site
   });
   return (
     <>
-      <span className="flex flex-wrap gap-x-4">
+      <span className="-my-2 flex flex-wrap gap-x-4">
         <button type="button" className={press} disabled={busy} aria-label={`Send the invitation of ${email} again`} onClick={() => run(() => inviteAgain(siteId, invitation), 'Sent again: only the new link works.')}>Send again</button>
         <button type="button" className={press} disabled={busy} aria-label={`Take the invitation of ${email} back`} onClick={() => run(() => takeInvitationBack(siteId, invitation), 'Taken back.')}>Take back</button>
       </span>

@@ -1,6 +1,7 @@
 import 'server-only';
 import { randomUUID } from 'node:crypto';
 import { RateLimiterMemory, RateLimiterRes } from 'rate-limiter-flexible';
+import type { Transaction } from 'sequelize';
 import { AppError } from '@/lib/http/errors';
 import { actIn, mustBeAllowed, type Actor } from '@/lib/server/actor';
 import { recordChange } from '@/lib/server/history';
@@ -27,40 +28,54 @@ const countInvitation = async (inviter: string): Promise<void> => {
   }
 };
 
-type Prepared = { readonly id: string; readonly token: string; readonly site: string; readonly invited: InvitationInput };
-
-/** Sent after the row is there, so that the link works when it arrives; a mail that is not taken leaves no row behind. */
-const sendOrUndo = async (actor: Actor, { token, site, invited }: Prepared, undo: () => Promise<unknown>): Promise<void> => {
-  try {
-    await sendMail(invitationMail(invited, { inviter: actor.person.name, site, token, days: invitationDays }));
-  } catch (error) {
-    await undo();
-    throw error;
-  }
-};
+type Invitation = { readonly id: string; readonly token: string; readonly invited: InvitationInput };
 
 const alreadyHere = (email: string): AppError =>
   new AppError('invalid', `${email} is on this site already. Nothing was sent.`, { fields: [{ field: 'email', reason: 'This person is on this site already; change what they are in the list.' }] });
 
-/** Invites somebody by e-mail. An open invitation to the same address ends: only the newest link works. */
-export const invite = async (actor: Actor, input: InvitationInput, now: Date): Promise<{ readonly id: string }> => {
-  mustBeAllowed(actor.membership, 'people.write');
-  await countInvitation(actor.person.id);
-  const token = newToken();
-  const id = randomUUID();
-  const invited = { ...input, mayOverride: input.role === 'chef' && input.mayOverride };
-  const site = await actIn(actor, 'people.write', async (transaction) => {
+const mustBeElsewhere = async (transaction: Transaction, siteId: string, email: string): Promise<void> => {
+  const person = await PersonRow.findOne({ where: { email }, transaction });
+  if (person !== null && (await MembershipRow.count({ where: { siteId, personId: person.id }, transaction })) > 0) throw alreadyHere(email);
+};
+
+/** The row has to be there before the mail, so that the link works when it arrives. Gives what stood in its place. */
+const writeInvitation = (actor: Actor, { id, token, invited }: Invitation, now: Date): Promise<{ readonly site: string; readonly earlier: readonly InvitationRow[] }> =>
+  actIn(actor, 'people.write', async (transaction) => {
     const { siteId } = actor;
-    const person = await PersonRow.findOne({ where: { email: invited.email }, transaction });
-    if (person !== null && (await MembershipRow.count({ where: { siteId, personId: person.id }, transaction })) > 0) throw alreadyHere(invited.email);
-    await InvitationRow.destroy({ where: { siteId, email: invited.email, usedAt: null }, transaction });
+    await mustBeElsewhere(transaction, siteId, invited.email);
+    const open = { siteId, email: invited.email, usedAt: null };
+    const earlier = await InvitationRow.findAll({ where: open, transaction });
+    await InvitationRow.destroy({ where: open, transaction });
     await InvitationRow.create({ id, siteId, ...invited, tokenHash: digestOf(token), invitedBy: actor.person.id, expiresAt: expiryFrom(now) }, { transaction });
     await recordChange(transaction, { siteId, personId: actor.person.id, action: 'member.invited', subjectKind: 'invitation', subjectId: id, summary: `${invited.email} invited as ${titleOrRole(invited)}` });
-    return (await SiteRow.findByPk(siteId, { transaction }))?.name ?? siteId;
+    return { site: (await SiteRow.findByPk(siteId, { transaction }))?.name ?? siteId, earlier };
   });
-  await sendOrUndo(actor, { id, token, site, invited }, () => InvitationRow.destroy({ where: { siteId: actor.siteId, id } }));
+
+/** The mail was not taken: what stood there before stands there again, and the history says both. */
+const undoInvitation = (actor: Actor, { id, invited }: Invitation, earlier: readonly InvitationRow[]): Promise<void> =>
+  actIn(actor, 'people.write', async (transaction) => {
+    const { siteId } = actor;
+    await InvitationRow.destroy({ where: { siteId, id }, transaction });
+    await InvitationRow.bulkCreate(earlier.map((row) => row.get({ plain: true })), { transaction });
+    await recordChange(transaction, { siteId, personId: actor.person.id, action: 'invitation.not-sent', subjectKind: 'invitation', subjectId: id, summary: `The invitation of ${invited.email} could not be sent` });
+  });
+
+const inviteAs = async (actor: Actor, id: string, input: InvitationInput, now: Date): Promise<{ readonly id: string }> => {
+  mustBeAllowed(actor.membership, 'people.write');
+  await countInvitation(actor.person.id);
+  const invitation = { id, token: newToken(), invited: { ...input, mayOverride: input.role === 'chef' && input.mayOverride } };
+  const { site, earlier } = await writeInvitation(actor, invitation, now);
+  try {
+    await sendMail(invitationMail(invitation.invited, { inviter: actor.person.name, site, token: invitation.token, days: invitationDays }));
+  } catch (error) {
+    await undoInvitation(actor, invitation, earlier);
+    throw error;
+  }
   return { id };
 };
+
+/** Invites somebody by e-mail. An open invitation to the same address ends: only the newest link works. */
+export const invite = (actor: Actor, input: InvitationInput, now: Date): Promise<{ readonly id: string }> => inviteAs(actor, randomUUID(), input, now);
 
 const openInvitation = async (actor: Actor, id: string): Promise<InvitationRow> => {
   mustBeAllowed(actor.membership, 'people.write');
@@ -72,7 +87,7 @@ const openInvitation = async (actor: Actor, id: string): Promise<InvitationRow> 
 /** The same invitation with a new link and a new week. */
 export const inviteAgain = async (actor: Actor, id: string, now: Date): Promise<{ readonly id: string }> => {
   const { email, role, title, mayOverride } = await openInvitation(actor, id);
-  return invite(actor, { email, role, title, mayOverride }, now);
+  return inviteAs(actor, id, { email, role, title, mayOverride }, now);
 };
 
 /** Its link does nothing from now on. */

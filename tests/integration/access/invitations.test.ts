@@ -135,6 +135,16 @@ describe('inviting', () => {
     expect(await InvitationRow.count()).toBe(0);
   });
 
+  it('leaves the invitation before it as it was, when the next mail is not taken', async () => {
+    const token = await inviteAndRead();
+    const { id } = (await InvitationRow.findOne({ where: { siteId: site } })) ?? { id: '' };
+    catcher.refuse(true);
+    vi.spyOn(process.stderr, 'write').mockReturnValue(true);
+    const response = await call(again, { method: 'POST', params: { site, invitation: id }, cookie: await cookieOf('marguerite-adeyemi') });
+    vi.mocked(process.stderr.write).mockRestore();
+    expect([response.status, (await acceptWith(token)).status]).toEqual([503, 200]);
+  });
+
   it('says so when there is no mail server', async () => {
     withMail(undefined);
     expect((await problemOf(await invite())).detail).toMatch(/^Tamis has no mail server here/);
